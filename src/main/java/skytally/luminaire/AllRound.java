@@ -1,0 +1,20 @@
+package skytally.luminaire;
+
+/** A bare source, equally strong every way: 1/4π. */
+record AllRound() implements IntensityDistribution {
+
+    @Override
+    public double perLumen(double x, double y, double z) {
+        return 1 / (4 * Math.PI);
+    }
+
+    @Override
+    public double[] breaksRad() {
+        return new double[0];
+    }
+
+    @Override
+    public boolean isRound() {
+        return true;
+    }
+}
