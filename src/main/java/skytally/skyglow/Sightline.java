@@ -1,0 +1,53 @@
+package skytally.skyglow;
+
+/**
+ * A line of sight from a viewer's place, reckoned from the light.
+ *
+ * @param groundDistanceM  from under the light to under the eye, along the ground; more than 0, at most 500 km
+ * @param eyeHeightM       above the ground at the light, 0 to 10 000 m
+ * @param zenithAngleRad   of the direction looked at, 0 (overhead) to π
+ * @param azimuthRad       of the direction looked at, clockwise from the direction to the light
+ */
+public record Sightline(double groundDistanceM, double eyeHeightM, double zenithAngleRad, double azimuthRad) {
+
+    private static final double FURTHEST_M = 500_000;
+    private static final double HIGHEST_M = 10_000;
+
+    public Sightline {
+        if (!(groundDistanceM > 0 && groundDistanceM <= FURTHEST_M)) {
+            throw new IllegalArgumentException(
+                    "Distance must be more than 0 and at most 500 000 m, not " + groundDistanceM);
+        }
+        if (!(eyeHeightM >= 0 && eyeHeightM <= HIGHEST_M)) {
+            throw new IllegalArgumentException("Eye height must be 0 to 10 000 m, not " + eyeHeightM);
+        }
+        if (!(zenithAngleRad >= 0 && zenithAngleRad <= Math.PI)) {
+            throw new IllegalArgumentException("Zenith angle must be 0 to π, not " + zenithAngleRad);
+        }
+        if (!Double.isFinite(azimuthRad)) {
+            throw new IllegalArgumentException("Azimuth must be finite, not " + azimuthRad);
+        }
+    }
+
+    /** The same, in degrees. */
+    public static Sightline ofDegrees(
+            double groundDistanceM, double eyeHeightM, double zenithAngleDeg, double azimuthDeg) {
+        return new Sightline(
+                groundDistanceM, eyeHeightM, StrictMath.toRadians(zenithAngleDeg), StrictMath.toRadians(azimuthDeg));
+    }
+
+    /**
+     * A line that passes level beside the light at an angle: the direction to the light turned by that angle about
+     * the axis square to it in its vertical plane.
+     *
+     * @param altitudeOfLightRad of the light above the eye's level
+     * @param besideRad          angle between the line and the direction to the light, 0 to π/2
+     */
+    public static Sightline beside(
+            double groundDistanceM, double eyeHeightM, double altitudeOfLightRad, double besideRad) {
+        double up = StrictMath.cos(besideRad) * StrictMath.sin(altitudeOfLightRad);
+        double ahead = StrictMath.cos(besideRad) * StrictMath.cos(altitudeOfLightRad);
+        double azimuth = StrictMath.atan2(StrictMath.sin(besideRad), ahead);
+        return new Sightline(groundDistanceM, eyeHeightM, StrictMath.acos(Math.max(-1, Math.min(1, up))), azimuth);
+    }
+}

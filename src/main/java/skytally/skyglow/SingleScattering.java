@@ -1,0 +1,260 @@
+package skytally.skyglow;
+
+import java.util.Arrays;
+import org.hipparchus.analysis.integration.gauss.GaussIntegrator;
+import org.hipparchus.analysis.integration.gauss.GaussIntegratorFactory;
+import skytally.atmosphere.Aerosol;
+import skytally.atmosphere.Atmosphere;
+import skytally.atmosphere.ExponentialLayer;
+import skytally.atmosphere.Molecules;
+
+/**
+ * The sky's brightness from light scattered once, exactly: for a line of sight P(s) = O + s v and a light at S
+ * <pre>
+ *   L = ∫ I(S→P) / |SP|² · exp(−τ(S,P)) · [ β_m p_m(γ) + ω β_a p_a(γ) ](P) · exp(−τ(P,O)) ds
+ * </pre>
+ * with γ the angle the light is turned by, over a round Earth. Nothing reaches P from behind the Earth's curve.
+ *
+ * <p>The line is cut at every edge of the emission; in each piece, with s₀ the point nearest the light and q the
+ * distance there, s = s₀ + q sinh y turns the peak near the light into a gentle slope for Gauss and Legendre's rule.
+ * Light scattered more than once is not in it, so read every result as "at least".
+ *
+ * @see "Garstang, R. H. (1986), Model for artificial night-sky illumination, PASP 98, 364: the geometry of single
+ *     scattering of a city's light"
+ */
+public final class SingleScattering {
+
+    private static final int NODES = 12;
+    /** Longest stretch of y that one set of nodes covers. */
+    private static final double PANEL = 1.6;
+
+    private static final double[] NODE = new double[NODES];
+    private static final double[] WEIGHT = new double[NODES];
+
+    static {
+        GaussIntegrator rule = new GaussIntegratorFactory().legendre(NODES);
+        for (int i = 0; i < NODES; i++) {
+            NODE[i] = rule.getPoint(i);
+            WEIGHT[i] = rule.getWeight(i);
+        }
+    }
+
+    private static final double EARTH = Atmosphere.EARTH_RADIUS_M;
+    private static final double MOLECULES_HEIGHT = Molecules.SCALE_HEIGHT_M;
+
+    private final Aerosol aerosol;
+    private final double[] molecularDepth;
+    private final double[] aerosolDepth;
+
+    /**
+     * @param air           the atmosphere between light and viewer
+     * @param wavelengthsNm the wavelengths to work at, in nanometres
+     */
+    public SingleScattering(Atmosphere air, double... wavelengthsNm) {
+        this(
+                air.aerosol(),
+                Arrays.stream(wavelengthsNm).map(air::molecularOpticalDepth).toArray(),
+                Arrays.stream(wavelengthsNm).map(air.aerosol()::opticalDepth).toArray());
+    }
+
+    /** With the optical depths of both layers given outright, one pair for each wavelength. */
+    SingleScattering(Aerosol aerosol, double[] molecularDepth, double[] aerosolDepth) {
+        this.aerosol = aerosol;
+        this.molecularDepth = molecularDepth;
+        this.aerosolDepth = aerosolDepth;
+    }
+
+    /**
+     * Radiance along a line of sight, for each wavelength.
+     *
+     * @return per square metre (and per steradian, where the intensity was in watts per steradian): multiply W/sr in
+     *     to get W/(m² sr) out, cd in to get cd/m² out
+     */
+    public double[] radiance(Emission light, Sightline line) {
+        double[] sum = new double[molecularDepth.length];
+        new Line(light, line).addTo(sum);
+        return sum;
+    }
+
+    /** One line of sight in the frame of the light: x level toward the viewer, y to the left, z up. */
+    private final class Line {
+
+        private final Emission light;
+        private final double lightHeight;
+        private final double eyeHeight;
+        private final double eyeX;
+        private final double eyeZ; // from the light, not from the ground
+        private final double viewX;
+        private final double viewY;
+        private final double viewZ;
+        private final double zenithCosine;
+        private final double nearest; // s of the point nearest the light
+        private final double nearestDistance;
+        private final double end;
+
+        Line(Emission light, Sightline line) {
+            this.light = light;
+            lightHeight = light.heightM();
+            eyeHeight = line.eyeHeightM();
+            double turn = line.groundDistanceM() / EARTH;
+            double sine = StrictMath.sin(turn);
+            double half = StrictMath.sin(turn / 2);
+            eyeX = (EARTH + eyeHeight) * sine;
+            eyeZ = eyeHeight - lightHeight - (EARTH + eyeHeight) * 2 * half * half;
+
+            zenithCosine = StrictMath.cos(line.zenithAngleRad());
+            double zenithSine = StrictMath.sin(line.zenithAngleRad());
+            double towardLight = zenithSine * StrictMath.cos(line.azimuthRad());
+            double cosine = 1 - 2 * half * half;
+            viewX = -towardLight * cosine + zenithCosine * sine;
+            viewY = zenithSine * StrictMath.sin(line.azimuthRad());
+            viewZ = towardLight * sine + zenithCosine * cosine;
+
+            nearest = -(eyeX * viewX + eyeZ * viewZ);
+            double apartSquared = eyeX * eyeX + eyeZ * eyeZ;
+            double least = 1e-12 * apartSquared;
+            nearestDistance = Math.sqrt(Math.max(apartSquared - nearest * nearest, least));
+            end = lengthInAir();
+        }
+
+        /** To the top of the air, or to the ground where the line runs into it. */
+        private double lengthInAir() {
+            double radius = EARTH + eyeHeight;
+            double along = radius * zenithCosine;
+            double lowestSquared = radius * radius - along * along;
+            if (zenithCosine < 0 && lowestSquared < EARTH * EARTH) {
+                // (R + h)² − R² written out, so that nothing is lost to rounding near the ground
+                double toGround = eyeHeight * (2 * EARTH + eyeHeight);
+                return toGround / (-along + Math.sqrt(along * along - toGround));
+            }
+            double top = EARTH + Atmosphere.TOP_M;
+            return -along + Math.sqrt(along * along + top * top - radius * radius);
+        }
+
+        void addTo(double[] sum) {
+            double[] cuts = cuts();
+            for (int i = 1; i < cuts.length; i++) {
+                addPiece(yOf(cuts[i - 1]), yOf(cuts[i]), sum);
+            }
+        }
+
+        private double yOf(double s) {
+            double x = (s - nearest) / nearestDistance;
+            // asinh, odd by construction
+            return Math.copySign(Math.log(Math.abs(x) + Math.sqrt(x * x + 1)), x);
+        }
+
+        private void addPiece(double fromY, double toY, double[] sum) {
+            int panels = Math.max(1, (int) Math.ceil((toY - fromY) / PANEL));
+            double half = (toY - fromY) / panels / 2;
+            for (int panel = 0; panel < panels; panel++) {
+                double middle = fromY + (2 * panel + 1) * half;
+                for (int i = 0; i < NODES; i++) {
+                    double y = middle + half * NODE[i];
+                    double grown = Math.exp(y);
+                    double shrunk = 1 / grown;
+                    double s = nearest + nearestDistance * (grown - shrunk) / 2;
+                    double ds = nearestDistance * (grown + shrunk) / 2 * half * WEIGHT[i];
+                    addPoint(s, ds, sum);
+                }
+            }
+        }
+
+        private void addPoint(double s, double ds, double[] sum) {
+            double x = eyeX + s * viewX;
+            double y = s * viewY;
+            double z = eyeZ + s * viewZ;
+            double squared = x * x + y * y + z * z;
+            double distance = Math.sqrt(squared);
+            double up = z / distance;
+            if (isBehindTheEarth(up, distance)) {
+                return;
+            }
+            double intensity = light.toward(x / distance, y / distance, up);
+            if (intensity == 0) {
+                return;
+            }
+            double cosine = (nearest - s) / distance; // light travels S→P, then P→O along −v
+            double height = heightAt(s);
+            double aerosolHeight = aerosol.scaleHeightM();
+            double molecules = Math.exp(-height / MOLECULES_HEIGHT) / MOLECULES_HEIGHT * Molecules.phase(cosine);
+            double haze = Math.exp(-height / aerosolHeight)
+                    / aerosolHeight
+                    * aerosol.singleScatteringAlbedo()
+                    * aerosol.phase(cosine);
+            double molecularAir = ExponentialLayer.on(EARTH, MOLECULES_HEIGHT, lightHeight, up, distance)
+                    + ExponentialLayer.on(EARTH, MOLECULES_HEIGHT, eyeHeight, zenithCosine, s);
+            double hazyAir = ExponentialLayer.on(EARTH, aerosolHeight, lightHeight, up, distance)
+                    + ExponentialLayer.on(EARTH, aerosolHeight, eyeHeight, zenithCosine, s);
+            double geometry = intensity / squared * ds;
+            for (int i = 0; i < sum.length; i++) {
+                double scattered = molecularDepth[i] * molecules + aerosolDepth[i] * haze;
+                sum[i] +=
+                        geometry * scattered * Math.exp(-molecularDepth[i] * molecularAir - aerosolDepth[i] * hazyAir);
+            }
+        }
+
+        /** √(r² + 2 r s cos z + s²) − R, written so that nothing is lost to rounding near the ground. */
+        private double heightAt(double s) {
+            double radius = EARTH + eyeHeight;
+            double gained = s * (2 * radius * zenithCosine + s);
+            return eyeHeight + gained / (radius + Math.sqrt(radius * radius + gained));
+        }
+
+        private boolean isBehindTheEarth(double up, double distance) {
+            if (up >= 0) {
+                return false;
+            }
+            double radius = EARTH + lightHeight;
+            double toLowest = -radius * up;
+            double lowestSquared = radius * radius - toLowest * toLowest;
+            return toLowest < distance && lowestSquared < EARTH * EARTH;
+        }
+
+        /** Both ends of the line and every edge of the emission between them, in order. */
+        private double[] cuts() {
+            double[] found = new double[2 + 2 * (light.edges().size() + 2)];
+            int count = 0;
+            found[count++] = 0;
+            found[count++] = end;
+            for (Emission.Cone edge : light.edges()) {
+                count = addCuts(edge, found, count);
+            }
+            count = addCuts(Emission.Cone.aboutZenith(0), found, count);
+            double radius = EARTH + lightHeight;
+            double dip = -Math.sqrt(lightHeight * (2 * EARTH + lightHeight)) / radius;
+            if (dip < 0) {
+                count = addCuts(Emission.Cone.aboutZenith(dip), found, count);
+            }
+            double[] cuts = Arrays.copyOf(found, count);
+            Arrays.sort(cuts);
+            return cuts;
+        }
+
+        /** Where {@code (P · axis)² = cosine² |P|²}; a plane gives a linear equation, not a double root. */
+        private int addCuts(Emission.Cone edge, double[] found, int count) {
+            double atEye = eyeX * edge.axisAhead() + eyeZ * edge.axisUp();
+            double gain = viewX * edge.axisAhead() + viewY * edge.axisLeft() + viewZ * edge.axisUp();
+            if (edge.cosine() == 0) {
+                return addCut(-atEye / gain, found, count);
+            }
+            double square = edge.cosine() * edge.cosine();
+            double a = gain * gain - square;
+            double b = atEye * gain + square * nearest;
+            double c = atEye * atEye - square * (eyeX * eyeX + eyeZ * eyeZ);
+            double root = Math.sqrt(b * b - a * c);
+            if (!(root >= 0)) {
+                return count;
+            }
+            double far = -(b + Math.copySign(root, b));
+            return addCut(c / far, found, addCut(far / a, found, count));
+        }
+
+        private int addCut(double s, double[] found, int count) {
+            if (s > 0 && s < end) {
+                found[count++] = s;
+            }
+            return count;
+        }
+    }
+}
