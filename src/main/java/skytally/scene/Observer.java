@@ -1,0 +1,21 @@
+package skytally.scene;
+
+import java.util.List;
+import skytally.geometry.Position;
+
+/**
+ * A place somebody looks from.
+ *
+ * @param mark  its name
+ * @param eye   position of the eye
+ * @param looks the directions looked in
+ */
+public record Observer(String mark, Position eye, List<Look> looks) {
+
+    public Observer {
+        looks = List.copyOf(looks);
+        if (!(eye.heightM() >= 0)) {
+            throw new IllegalArgumentException("An eye must not be below the ground, at " + eye.heightM());
+        }
+    }
+}
