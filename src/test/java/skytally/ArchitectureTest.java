@@ -36,6 +36,7 @@ class ArchitectureTest {
             geometry   :
             photometry :
             notation   :
+            spectrum   :
             """);
 
     /** What people see and keep. */
