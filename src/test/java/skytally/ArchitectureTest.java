@@ -36,9 +36,11 @@ class ArchitectureTest {
             geometry   :
             photometry :
             notation   :
+            spectrum   :
             luminaire  :
             atmosphere :
             skyglow    : atmosphere
+            scene      : spectrum luminaire atmosphere
             """);
 
     /** What people see and keep. */
