@@ -45,6 +45,11 @@ public record Rotation(
                 zx * first.xz + zy * first.yz + zz * first.zz);
     }
 
+    /** The turn back: its matrix is this one's transposed. */
+    public Rotation inverse() {
+        return new Rotation(xx, yx, zx, xy, yy, zy, xz, yz, zz);
+    }
+
     /** A direction of the turned thing's own frame, as the world sees it. */
     public Direction turn(Direction own) {
         return Direction.of(
@@ -55,9 +60,6 @@ public record Rotation(
 
     /** A direction of the world, as the turned thing's own frame sees it. */
     public Direction turnBack(Direction world) {
-        return Direction.of(
-                xx * world.x() + yx * world.y() + zx * world.z(),
-                xy * world.x() + yy * world.y() + zy * world.z(),
-                xz * world.x() + yz * world.y() + zz * world.z());
+        return inverse().turn(world);
     }
 }

@@ -1,0 +1,155 @@
+package skytally.firstlook;
+
+import java.math.BigDecimal;
+import java.util.ArrayList;
+import java.util.EnumMap;
+import java.util.EnumSet;
+import java.util.List;
+import java.util.Map;
+import java.util.Optional;
+import java.util.Set;
+import java.util.stream.Collectors;
+import org.jspecify.annotations.Nullable;
+import skytally.atmosphere.Clearness;
+import skytally.luminaire.Shape;
+import skytally.luminaire.Shapes;
+import skytally.notation.NumberReader;
+import skytally.notation.QuantityFormat;
+import skytally.spectrum.SpectralClass;
+import skytally.spectrum.SpectralClasses;
+
+/** Reads the sentence from what was typed, and finds everything wrong with it at once. */
+final class SentenceReader {
+
+    private static final int QUOTED = 40;
+
+    /**
+     * One thing wrong.
+     *
+     * @param blank   where
+     * @param message what is there, what may be, and how to mend it
+     */
+    record Fault(Blank blank, String message) {}
+
+    /**
+     * What came of reading.
+     *
+     * @param sentence the sentence, when nothing is wrong
+     * @param faults   everything wrong, in the order of the sentence
+     */
+    record Result(Optional<Sentence> sentence, List<Fault> faults) {}
+
+    private final Map<Blank, String> texts = new EnumMap<>(Blank.class);
+    private final Set<Blank> guessed = EnumSet.noneOf(Blank.class);
+    private final List<Fault> faults = new ArrayList<>();
+
+    private SentenceReader() {}
+
+    /**
+     * @param typed by field name; a blank that is not among them is guessed
+     */
+    static Result read(Map<String, ? extends List<@Nullable String>> typed) {
+        SentenceReader reader = new SentenceReader();
+        for (Blank blank : Blank.values()) {
+            reader.read(blank, typed.get(blank.field()));
+        }
+        if (!reader.faults.isEmpty()) {
+            return new Result(Optional.empty(), List.copyOf(reader.faults));
+        }
+        Sentence sentence = new Sentence(reader.texts, reader.guessed).withGuessesSettled();
+        return new Result(Optional.of(sentence), List.of());
+    }
+
+    private void read(Blank blank, @Nullable List<@Nullable String> typed) {
+        if (typed == null || typed.isEmpty()) {
+            guessed.add(blank);
+            texts.put(blank, Guesses.of(blank).likely());
+            return;
+        }
+        if (typed.size() > 1) {
+            fault(blank, "is there " + typed.size() + " times; leave one of them.");
+            return;
+        }
+        String text = typed.get(0) == null ? "" : typed.get(0).strip();
+        if (text.isEmpty()) {
+            fault(blank, "is empty. Enter " + what(blank) + ".");
+        } else if (blank.kind() == Blank.Kind.CHOICE) {
+            readChoice(blank, text);
+        } else {
+            readNumber(blank, text);
+        }
+    }
+
+    private void readChoice(Blank blank, String text) {
+        List<String> choices = choices(blank);
+        if (choices.contains(text)) {
+            texts.put(blank, text);
+        } else {
+            fault(blank, "“" + quoted(text) + "” is not known. Choose one of: " + String.join(", ", choices) + ".");
+        }
+    }
+
+    private void readNumber(Blank blank, String text) {
+        NumberReader.Reading reading = NumberReader.read(text, blank.kind() == Blank.Kind.WHOLE);
+        if (reading instanceof NumberReader.Unreadable unreadable) {
+            fault(blank, "“" + quoted(text) + "” " + unreadable.why() + ". Enter " + what(blank) + ".");
+        } else if (reading instanceof NumberReader.Number number) {
+            checkNumber(blank, number.value());
+        }
+    }
+
+    private void checkNumber(Blank blank, BigDecimal value) {
+        if (value.compareTo(blank.least()) < 0 || value.compareTo(blank.most()) > 0) {
+            fault(blank, "must be " + bounds(blank) + ".");
+        } else if (blank.kind() == Blank.Kind.WHOLE
+                && value.stripTrailingZeros().scale() > 0) {
+            fault(blank, "must be a whole number, " + bounds(blank) + ".");
+        } else {
+            texts.put(blank, plain(value));
+        }
+    }
+
+    /** In bounds by now, so the plain notation is short; digits beyond the twentieth say nothing. */
+    private static String plain(BigDecimal value) {
+        BigDecimal shortest = value.setScale(Math.min(20, Math.max(0, value.scale())), java.math.RoundingMode.HALF_EVEN)
+                .stripTrailingZeros();
+        return (shortest.scale() < 0 ? shortest.setScale(0) : shortest).toPlainString();
+    }
+
+    private void fault(Blank blank, String rest) {
+        String separator = rest.startsWith("“") ? ": " : " ";
+        faults.add(new Fault(blank, blank.label() + separator + rest));
+    }
+
+    private static String what(Blank blank) {
+        return switch (blank.kind()) {
+            case WHOLE -> "a whole number " + bounds(blank) + ", such as " + blank.example();
+            case NUMBER -> "a number " + bounds(blank) + ", such as " + blank.example();
+            case CHOICE -> "one of: " + String.join(", ", choices(blank));
+        };
+    }
+
+    private static String bounds(Blank blank) {
+        String unit = blank.unit().isEmpty() || blank.unit().equals("°") ? blank.unit() : "\u00a0" + blank.unit();
+        return "from " + QuantityFormat.asTyped(blank.least()) + " to " + QuantityFormat.asTyped(blank.most()) + unit;
+    }
+
+    private static String quoted(String text) {
+        return text.length() <= QUOTED ? text : text.substring(0, QUOTED) + "…";
+    }
+
+    /** The ids a blank may hold. */
+    static List<String> choices(Blank blank) {
+        return switch (blank) {
+            case SPECTRAL_CLASS ->
+                SpectralClasses.all().stream()
+                        .filter(each -> !each.isReference())
+                        .map(SpectralClass::id)
+                        .toList();
+            case SHAPE -> Shapes.all().stream().map(Shape::id).toList();
+            case AIR ->
+                java.util.Arrays.stream(Clearness.values()).map(Clearness::id).collect(Collectors.toList());
+            default -> throw new IllegalArgumentException(blank + " is not a choice");
+        };
+    }
+}

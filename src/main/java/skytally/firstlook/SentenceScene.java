@@ -1,0 +1,108 @@
+package skytally.firstlook;
+
+import java.util.EnumMap;
+import java.util.LinkedHashMap;
+import java.util.List;
+import java.util.Map;
+import skytally.atmosphere.Atmosphere;
+import skytally.atmosphere.DirectPath;
+import skytally.geometry.Attitude;
+import skytally.geometry.Direction;
+import skytally.geometry.Position;
+import skytally.luminaire.Shape;
+import skytally.photometry.LuminousFlux;
+import skytally.scene.Known;
+import skytally.scene.Lamp;
+import skytally.scene.Look;
+import skytally.scene.Observer;
+import skytally.scene.OpenScene;
+import skytally.scene.Scene;
+import skytally.scene.State;
+import skytally.scene.Surroundings;
+
+/**
+ * The scene a sentence describes: the lights at one point, one eye to the north of them, over level ground at the
+ * height of the sea.
+ */
+final class SentenceScene implements OpenScene {
+
+    /** Mark of the one place. */
+    static final String HERE = "here";
+
+    private static final double TOWARD_SITE_ALTITUDE = Math.toRadians(30);
+
+    private final Sentence sentence;
+    private final Map<String, Guess> open = new LinkedHashMap<>();
+
+    SentenceScene(Sentence sentence) {
+        this.sentence = sentence;
+        sentence.guesses().stream()
+                .filter(Guess::hasRange)
+                .forEach(guess -> open.put(guess.blank().field(), guess));
+    }
+
+    @Override
+    public List<String> guesses() {
+        return List.copyOf(open.keySet());
+    }
+
+    @Override
+    public Known known(String value) {
+        return Blank.byField(value)
+                .map(blank -> sentence.isGuess(blank)
+                        ? new Known(State.ASSUMED, Guesses.of(blank).why())
+                        : new Known(State.GIVEN, "your sentence"))
+                .orElseThrow(() -> new IllegalArgumentException("No blank is called " + value));
+    }
+
+    @Override
+    public Scene drawn(Map<String, End> ends) {
+        Map<Blank, String> moved = new EnumMap<>(Blank.class);
+        ends.forEach((name, end) -> {
+            Guess guess = open.get(name);
+            if (guess != null) {
+                moved.put(guess.blank(), end == End.LOW ? guess.low() : guess.high());
+            }
+        });
+        return scene(moved.isEmpty() ? sentence : sentence.with(moved));
+    }
+
+    private static Scene scene(Sentence s) {
+        Shape shape = s.shape();
+        Lamp lights = new Lamp(
+                "lights",
+                "lights",
+                s.count(),
+                new Position(0, 0, s.mountingHeightM()),
+                new Attitude(0, s.tiltDeg(), 0),
+                new LuminousFlux(s.lumens()),
+                shape.distribution(),
+                s.spectralClass().spectrum(),
+                shape.luminousSizeM(),
+                shape.nearestM());
+        return new Scene(
+                List.of(lights),
+                List.of(observer(s)),
+                new Surroundings(Atmosphere.atSeaLevel(s.air()), s.groundReflectance()));
+    }
+
+    private static Observer observer(Sentence s) {
+        DirectPath path = DirectPath.between(s.mountingHeightM(), s.eyeHeightM(), s.distanceM());
+        Direction south = Direction.toward(Math.PI, 0);
+        return new Observer(
+                HERE,
+                new Position(0, s.distanceM(), s.eyeHeightM()),
+                south,
+                List.of(
+                        new Look(Look.BESIDE, beside(path.altitudeAtEyeRad(), Math.toRadians(s.glareAngleDeg()))),
+                        new Look(Look.ZENITH, Direction.UP),
+                        new Look(Look.TOWARD_SITE, Direction.toward(Math.PI, TOWARD_SITE_ALTITUDE))));
+    }
+
+    /** The direction to the lights turned by an angle, level to the right of them. */
+    private static Direction beside(double altitudeRad, double angleRad) {
+        double near = StrictMath.cos(angleRad);
+        return Direction.of(
+                -StrictMath.sin(angleRad), -near * StrictMath.cos(altitudeRad), near * StrictMath.sin(altitudeRad));
+    }
+}

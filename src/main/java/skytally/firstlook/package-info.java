@@ -1,0 +1,9 @@
+/**
+ * Knows the first answer: one sentence about a lighting proposal in, what it does to one place out, nothing kept.
+ * Does not know projects, rules, or how anything is worked out.
+ * Metres, lumens, degrees as typed; feet are turned into metres at the door.
+ */
+@NullMarked
+package skytally.firstlook;
+
+import org.jspecify.annotations.NullMarked;
