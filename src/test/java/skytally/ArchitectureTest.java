@@ -37,6 +37,7 @@ class ArchitectureTest {
             photometry :
             notation   :
             spectrum   :
+            glare      :
             """);
 
     /** What people see and keep. */
