@@ -38,6 +38,7 @@ class ArchitectureTest {
             notation   :
             spectrum   :
             glare      :
+            naturalsky : spectrum
             """);
 
     /** What people see and keep. */
