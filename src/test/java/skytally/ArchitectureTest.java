@@ -39,12 +39,19 @@ class ArchitectureTest {
             spectrum   :
             luminaire  :
             atmosphere :
+            glare      :
             skyglow    : atmosphere
+            naturalsky : spectrum
+            eye        : spectrum atmosphere
             scene      : spectrum luminaire atmosphere
+            assessment : spectrum luminaire atmosphere glare skyglow naturalsky eye scene
+            charts     : spectrum luminaire naturalsky eye assessment
             """);
 
     /** What people see and keep. */
-    private static final Map<String, List<String>> FEATURES = rooms("");
+    private static final Map<String, List<String>> FEATURES = rooms("""
+            firstlook  : spectrum luminaire atmosphere scene assessment charts
+            """);
 
     /** Beside the JDK, the core may use these and no others. */
     private static final List<String> CORE_LIBRARIES =
