@@ -1,6 +1,8 @@
 package skytally.assessment;
 
 import skytally.atmosphere.Atmosphere;
+import skytally.atmosphere.DirectPath;
+import skytally.atmosphere.Molecules;
 import skytally.spectrum.Passband;
 import skytally.spectrum.Spectrum;
 
@@ -69,5 +71,12 @@ final class LuminousTransmission {
         double third = molecules * molecules * (skewMMM * molecules + 3 * skewMMA * haze)
                 + haze * haze * (3 * skewMAA * molecules + skewAAA * haze);
         return Math.exp(-first + second / 2 - third / 6);
+    }
+
+    /** Along a line of sight. */
+    double along(DirectPath path, Atmosphere air) {
+        return through(
+                path.airOnPath(Molecules.SCALE_HEIGHT_M),
+                path.airOnPath(air.aerosol().scaleHeightM()));
     }
 }

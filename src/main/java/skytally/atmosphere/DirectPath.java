@@ -54,7 +54,7 @@ public record DirectPath(
     }
 
     /** How much of a layer of this scale height lies on the path, as a multiple of what lies overhead. */
-    double airOnPath(double scaleHeightM) {
+    public double airOnPath(double scaleHeightM) {
         return ExponentialLayer.on(
                 EFFECTIVE_EARTH_RADIUS_M, scaleHeightM, lampHeightM, StrictMath.sin(altitudeAtLampRad), lengthM);
     }

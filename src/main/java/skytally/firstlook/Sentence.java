@@ -5,6 +5,7 @@ import java.util.ArrayList;
 import java.util.EnumMap;
 import java.util.List;
 import java.util.Map;
+import java.util.Objects;
 import java.util.Set;
 import java.util.TreeSet;
 import skytally.atmosphere.Clearness;
@@ -71,7 +72,7 @@ record Sentence(Map<Blank, String> texts, Set<Blank> guessed) {
     }
 
     String text(Blank blank) {
-        return java.util.Objects.requireNonNull(texts.get(blank));
+        return Objects.requireNonNull(texts.get(blank));
     }
 
     BigDecimal number(Blank blank) {
@@ -86,13 +87,13 @@ record Sentence(Map<Blank, String> texts, Set<Blank> guessed) {
     List<Guess> guesses() {
         List<Guess> guesses = new ArrayList<>();
         for (Blank blank : new TreeSet<>(guessed)) {
-            guesses.add(guessOf(blank));
+            guesses.add(guess(blank));
         }
         return guesses;
     }
 
     /** A shape that stands upright by its nature is guessed upright, not level. */
-    private Guess guessOf(Blank blank) {
+    Guess guess(Blank blank) {
         Guess table = Guesses.of(blank);
         double usual = shape().usualTiltDeg();
         if (blank != Blank.TILT || usual == 0) {

@@ -1,14 +1,15 @@
 package skytally.firstlook;
 
 import java.math.BigDecimal;
+import java.math.RoundingMode;
 import java.util.ArrayList;
+import java.util.Arrays;
 import java.util.EnumMap;
 import java.util.EnumSet;
 import java.util.List;
 import java.util.Map;
 import java.util.Optional;
 import java.util.Set;
-import java.util.stream.Collectors;
 import org.jspecify.annotations.Nullable;
 import skytally.atmosphere.Clearness;
 import skytally.luminaire.Shape;
@@ -111,7 +112,7 @@ final class SentenceReader {
 
     /** In bounds by now, so the plain notation is short; digits beyond the twentieth say nothing. */
     private static String plain(BigDecimal value) {
-        BigDecimal shortest = value.setScale(Math.min(20, Math.max(0, value.scale())), java.math.RoundingMode.HALF_EVEN)
+        BigDecimal shortest = value.setScale(Math.min(20, Math.max(0, value.scale())), RoundingMode.HALF_EVEN)
                 .stripTrailingZeros();
         return (shortest.scale() < 0 ? shortest.setScale(0) : shortest).toPlainString();
     }
@@ -147,8 +148,7 @@ final class SentenceReader {
                         .map(SpectralClass::id)
                         .toList();
             case SHAPE -> Shapes.all().stream().map(Shape::id).toList();
-            case AIR ->
-                java.util.Arrays.stream(Clearness.values()).map(Clearness::id).collect(Collectors.toList());
+            case AIR -> Arrays.stream(Clearness.values()).map(Clearness::id).toList();
             default -> throw new IllegalArgumentException(blank + " is not a choice");
         };
     }

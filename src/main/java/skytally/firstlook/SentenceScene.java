@@ -16,8 +16,8 @@ import skytally.scene.Lamp;
 import skytally.scene.Look;
 import skytally.scene.Observer;
 import skytally.scene.OpenScene;
+import skytally.scene.Property;
 import skytally.scene.Scene;
-import skytally.scene.State;
 import skytally.scene.Surroundings;
 
 /**
@@ -47,12 +47,25 @@ final class SentenceScene implements OpenScene {
     }
 
     @Override
-    public Known known(String value) {
-        return Blank.byField(value)
-                .map(blank -> sentence.isGuess(blank)
-                        ? new Known(State.ASSUMED, Guesses.of(blank).why())
-                        : new Known(State.GIVEN, "your sentence"))
-                .orElseThrow(() -> new IllegalArgumentException("No blank is called " + value));
+    public Known known(Property property, String mark) {
+        Blank blank = blank(property);
+        return sentence.isGuess(blank) ? Known.assumed(sentence.guess(blank).why()) : Known.given("your sentence");
+    }
+
+    private static Blank blank(Property property) {
+        return switch (property) {
+            case COUNT -> Blank.COUNT;
+            case LUMENS -> Blank.LUMENS;
+            case SPECTRUM -> Blank.SPECTRAL_CLASS;
+            case SHAPE -> Blank.SHAPE;
+            case TILT -> Blank.TILT;
+            case MOUNTING_HEIGHT -> Blank.MOUNTING_HEIGHT;
+            case EYE_HEIGHT -> Blank.EYE_HEIGHT;
+            case DISTANCE -> Blank.DISTANCE;
+            case LOOK_ANGLE -> Blank.GLARE_ANGLE;
+            case AIR -> Blank.AIR;
+            case GROUND -> Blank.GROUND_REFLECTANCE;
+        };
     }
 
     @Override
@@ -94,9 +107,12 @@ final class SentenceScene implements OpenScene {
                 new Position(0, s.distanceM(), s.eyeHeightM()),
                 south,
                 List.of(
-                        new Look(Look.BESIDE, beside(path.altitudeAtEyeRad(), Math.toRadians(s.glareAngleDeg()))),
-                        new Look(Look.ZENITH, Direction.UP),
-                        new Look(Look.TOWARD_SITE, Direction.toward(Math.PI, TOWARD_SITE_ALTITUDE))));
+                        new Look(
+                                Look.BESIDE,
+                                Look.Purpose.GLARE,
+                                beside(path.altitudeAtEyeRad(), Math.toRadians(s.glareAngleDeg()))),
+                        new Look(Look.ZENITH, Look.Purpose.SKY, Direction.UP),
+                        new Look(Look.TOWARD_SITE, Look.Purpose.SKY, Direction.toward(Math.PI, TOWARD_SITE_ALTITUDE))));
     }
 
     /** The direction to the lights turned by an angle, level to the right of them. */

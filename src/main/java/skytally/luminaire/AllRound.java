@@ -17,4 +17,9 @@ record AllRound() implements IntensityDistribution {
     public boolean isRound() {
         return true;
     }
+
+    @Override
+    public String formula() {
+        return "1 / 4π";
+    }
 }

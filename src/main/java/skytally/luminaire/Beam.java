@@ -1,5 +1,7 @@
 package skytally.luminaire;
 
+import skytally.notation.QuantityFormat;
+
 /**
  * A round beam about the nadir axis: {@code I = (n + 1) / 2π · cosⁿ γ} below its own level, nothing above.
  * With n = 1 it is the matt (Lambertian) surface, {@code cos γ / π}.
@@ -45,5 +47,13 @@ record Beam(double exponent) implements IntensityDistribution {
     @Override
     public boolean isRound() {
         return true;
+    }
+
+    @Override
+    public String formula() {
+        return exponent == 1
+                ? "cos γ / π for γ < 90°, else 0"
+                : "(n + 1) / 2π · cosⁿ γ for γ < 90°, else 0, with n = "
+                        + QuantityFormat.significant(exponent, 6).plain();
     }
 }

@@ -17,4 +17,9 @@ record Capped() implements IntensityDistribution {
     public boolean isRound() {
         return true;
     }
+
+    @Override
+    public String formula() {
+        return "1 / 2π for γ ≤ 90°, else 0";
+    }
 }

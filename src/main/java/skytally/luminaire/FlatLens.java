@@ -1,5 +1,7 @@
 package skytally.luminaire;
 
+import skytally.notation.QuantityFormat;
+
 /**
  * A flat clear lens facing down that throws most of its light to the sides. A plain stand-in, not a measured fitting:
  * <pre>
@@ -49,5 +51,15 @@ record FlatLens(double towardStreet, double alongRoad) implements IntensityDistr
     @Override
     public boolean isRound() {
         return towardStreet == 0 && alongRoad == 0;
+    }
+
+    @Override
+    public String formula() {
+        String sides = isRound()
+                ? ""
+                : " (1 + " + QuantityFormat.decimals(towardStreet, 1) + " cos φ − "
+                        + QuantityFormat.decimals(alongRoad, 1) + " cos 2φ)";
+        return "[0.1 cos γ + cos² γ (1 + 12 sin⁸ γ" + sides + ")] / "
+                + QuantityFormat.significant(FLUX, 5).plain() + " for γ < 90°, else 0";
     }
 }

@@ -19,4 +19,7 @@ public interface IntensityDistribution {
 
     /** Whether the intensity is the same all round the nadir axis. */
     boolean isRound();
+
+    /** The intensity per lumen in symbols, as printed in a working; γ from the nadir axis, φ from the street side. */
+    String formula();
 }

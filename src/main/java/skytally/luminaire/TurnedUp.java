@@ -22,4 +22,9 @@ record TurnedUp(IntensityDistribution down) implements IntensityDistribution {
     public boolean isRound() {
         return down.isRound();
     }
+
+    @Override
+    public String formula() {
+        return down.formula() + ", γ from straight up";
+    }
 }

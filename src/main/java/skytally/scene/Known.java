@@ -8,6 +8,10 @@ package skytally.scene;
  */
 public record Known(State state, String from) {
 
+    public static Known given(String from) {
+        return new Known(State.GIVEN, from);
+    }
+
     public static Known workedOut(String from) {
         return new Known(State.WORKED_OUT, from);
     }

@@ -6,9 +6,18 @@ import skytally.geometry.Direction;
  * A direction somebody looks in.
  *
  * @param id        its name at its place, such as {@code zenith}
+ * @param purpose   what is asked of it
  * @param direction of the line of sight
  */
-public record Look(String id, Direction direction) {
+public record Look(String id, Purpose purpose, Direction direction) {
+
+    /** What is asked of a direction. */
+    public enum Purpose {
+        /** How the lamps beside it dazzle and what the air scatters into it. */
+        GLARE,
+        /** How bright the sky is there. */
+        SKY
+    }
 
     public static final String ZENITH = "zenith";
     public static final String TOWARD_SITE = "toward-site";

@@ -22,6 +22,11 @@ public interface OpenScene {
      */
     Scene drawn(Map<String, End> ends);
 
-    /** How well a value that went into the scene is known. */
-    Known known(String value);
+    /**
+     * How well a value that went into the scene is known.
+     *
+     * @param property which kind of value
+     * @param mark     of the lamp or the place it belongs to
+     */
+    Known known(Property property, String mark);
 }

@@ -35,19 +35,4 @@ public record Sightline(double groundDistanceM, double eyeHeightM, double zenith
         return new Sightline(
                 groundDistanceM, eyeHeightM, StrictMath.toRadians(zenithAngleDeg), StrictMath.toRadians(azimuthDeg));
     }
-
-    /**
-     * A line that passes level beside the light at an angle: the direction to the light turned by that angle about
-     * the axis square to it in its vertical plane.
-     *
-     * @param altitudeOfLightRad of the light above the eye's level
-     * @param besideRad          angle between the line and the direction to the light, 0 to π/2
-     */
-    public static Sightline beside(
-            double groundDistanceM, double eyeHeightM, double altitudeOfLightRad, double besideRad) {
-        double up = StrictMath.cos(besideRad) * StrictMath.sin(altitudeOfLightRad);
-        double ahead = StrictMath.cos(besideRad) * StrictMath.cos(altitudeOfLightRad);
-        double azimuth = StrictMath.atan2(StrictMath.sin(besideRad), ahead);
-        return new Sightline(groundDistanceM, eyeHeightM, StrictMath.acos(Math.max(-1, Math.min(1, up))), azimuth);
-    }
 }

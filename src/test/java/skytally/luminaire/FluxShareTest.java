@@ -87,6 +87,11 @@ class FluxShareTest {
             public boolean isRound() {
                 return false;
             }
+
+            @Override
+            public String formula() {
+                return "cos γ sin³ φ on the left";
+            }
         };
         double raised = FluxShare.upward(leftOnly, new Attitude(0, 0, 20));
         double lowered = FluxShare.upward(leftOnly, new Attitude(0, 0, -20));
@@ -134,6 +139,11 @@ class FluxShareTest {
         @Override
         public boolean isRound() {
             return false;
+        }
+
+        @Override
+        public String formula() {
+            return "made up for checks";
         }
     }
 }

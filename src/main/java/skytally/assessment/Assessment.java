@@ -1,0 +1,78 @@
+package skytally.assessment;
+
+import java.util.Collections;
+import java.util.LinkedHashMap;
+import java.util.List;
+import java.util.Map;
+import java.util.Optional;
+
+/**
+ * Everything worked out of a scene: the second doorway of the house. Pages, pictures and files read it and work out
+ * nothing themselves.
+ *
+ * @param circumstance when and in what weather it holds
+ * @param figures      by key, in the order of working
+ * @param influences   of every guess on every figure
+ * @param notes        what limits the results, in sentences
+ */
+public record Assessment(
+        Circumstance circumstance, Map<String, Figure> figures, List<Influence> influences, List<Note> notes) {
+
+    /** What a note is about. */
+    public enum Topic {
+        BELOW_HORIZON,
+        NO_DIRECT_LIGHT,
+        TOO_NEAR,
+        SMALL_PATCH,
+        NOT_A_POINT,
+        BRIGHTER_THAN_MOON,
+        FAINT,
+        GROUND_NOT_A_POINT,
+        FAR_SKY,
+        FIRST_SCATTERING
+    }
+
+    /**
+     * A limit to what the numbers say.
+     *
+     * @param topic    what it is about
+     * @param sentence as printed
+     */
+    public record Note(Topic topic, String sentence) {}
+
+    public Assessment {
+        figures = Collections.unmodifiableMap(new LinkedHashMap<>(figures));
+        influences = List.copyOf(influences);
+        notes = List.copyOf(notes);
+    }
+
+    /**
+     * A figure of one place.
+     *
+     * @param place   mark of the place
+     * @param measure its path, such as {@code direct/illuminance}
+     */
+    public Figure figure(String place, String measure) {
+        String key = key(place, measure, circumstance);
+        Figure figure = figures.get(key);
+        if (figure == null) {
+            throw new IllegalArgumentException("No figure has the key " + key);
+        }
+        return figure;
+    }
+
+    static String key(String place, String measure, Circumstance circumstance) {
+        return place + "/" + measure + "/" + circumstance.path();
+    }
+
+    /** The guess that moves a figure most, when any does. */
+    public Optional<Influence> strongest(Figure figure) {
+        return influences.stream()
+                .filter(influence -> influence.figure().equals(figure.key()) && influence.strength() > 0)
+                .max(java.util.Comparator.comparingDouble(Influence::strength));
+    }
+
+    public boolean has(Topic topic) {
+        return notes.stream().anyMatch(note -> note.topic() == topic);
+    }
+}

@@ -1,0 +1,88 @@
+package skytally.assessment;
+
+import org.jspecify.annotations.Nullable;
+import skytally.scene.Look;
+
+/** The numbers worked out for every place, and for every direction looked in there. */
+enum Measure {
+    DISTANCE(null, "direct/distance", "Distance along the line of sight", Unit.METRE),
+    ALTITUDE(null, "direct/altitude", "Height of the light above the level of the eye", Unit.DEGREE),
+    INTENSITY(null, "direct/intensity", "Strength of one lamp toward the place", Unit.CANDELA),
+    ONE_ILLUMINANCE(null, "direct/one-lamp-illuminance", "Light at the eye from the brightest single lamp", Unit.LUX),
+    ILLUMINANCE(null, "direct/illuminance", "Light at the eye from all lamps together", Unit.LUX),
+    WINDOW_ILLUMINANCE(null, "direct/window-illuminance", "Light on the window, outside of the glass", Unit.LUX),
+    ONE_MAGNITUDE(null, "direct/one-lamp-magnitude", "Magnitude of the brightest single lamp", Unit.MAGNITUDE),
+    MAGNITUDE(null, "direct/magnitude", "Magnitude of all lamps together", Unit.MAGNITUDE),
+    ONE_STAR(null, "direct/one-lamp-star-overhead", "Star overhead that equals one lamp", Unit.MAGNITUDE),
+    STAR(null, "direct/star-overhead", "Star overhead that equals all together", Unit.MAGNITUDE),
+    STANDARD_MAGNITUDE(
+            null, "direct/one-lamp-standard-magnitude", "Magnitude of one lamp at 1 km without air", Unit.MAGNITUDE),
+    SCOTOPIC_MAGNITUDE(
+            null,
+            "direct/one-lamp-magnitude-dark-adapted",
+            "Magnitude of one lamp to the dark-adapted eye, against a Sun-like star",
+            Unit.MAGNITUDE),
+    ANGULAR_SIZE(null, "direct/angular-size", "Width of the bright part as seen", Unit.ARCMINUTE),
+    NOTICED_TO(null, "direct/noticed-to", "Distance to which one lamp is reliably noticed", Unit.METRE),
+    DETECTED_TO(null, "direct/detected-to", "Distance to which one lamp can just be made out", Unit.METRE),
+    UPWARD_SHARE(null, "lamp/upward-share", "Share sent above the level as it hangs", Unit.SHARE_PERCENT),
+    LOW_SHARE(null, "lamp/low-angle-share", "Share sent between the level and 10° above it", Unit.SHARE_PERCENT),
+
+    GLARE_ANGLE(Look.Purpose.GLARE, "glare/angle", "Angle between the lights and where one looks", Unit.DEGREE),
+    VEIL(Look.Purpose.GLARE, "glare/veil", "Veil in the eye", Unit.CANDELA_PER_SQUARE_METRE),
+    VEIL_BRIGHTNESS(
+            Look.Purpose.GLARE, "glare/veil-brightness", "The veil as a sky", Unit.MAGNITUDE_PER_SQUARE_ARCSECOND),
+    VEIL_NATURAL_SKIES(Look.Purpose.GLARE, "glare/natural-skies", "The veil in natural skies", Unit.NATURAL_SKIES),
+    VEIL_REACH(Look.Purpose.GLARE, "glare/reach", "Angle inside which the veil exceeds a natural sky", Unit.DEGREE),
+    HALO(Look.Purpose.GLARE, "glare/halo", "Light the air scatters there", Unit.CANDELA_PER_SQUARE_METRE),
+
+    SKY_ARTIFICIAL(Look.Purpose.SKY, "sky/artificial", "Sky glow of the lights", Unit.CANDELA_PER_SQUARE_METRE),
+    SKY_NATURAL(Look.Purpose.SKY, "sky/natural", "Natural sky", Unit.CANDELA_PER_SQUARE_METRE),
+    SKY_NATURAL_BRIGHTNESS(
+            Look.Purpose.SKY, "sky/natural-brightness", "Natural sky", Unit.MAGNITUDE_PER_SQUARE_ARCSECOND),
+    SKY_BRIGHTNESS(Look.Purpose.SKY, "sky/brightness", "Sky with the lights", Unit.MAGNITUDE_PER_SQUARE_ARCSECOND),
+    SKY_INCREASE(Look.Purpose.SKY, "sky/increase", "Increase over the natural sky, V band", Unit.PERCENT),
+    LIMIT_NATURAL(Look.Purpose.SKY, "eye/limit-natural", "Faintest star under the natural sky", Unit.MAGNITUDE),
+    LIMIT(Look.Purpose.SKY, "eye/limit", "Faintest star with the lights", Unit.MAGNITUDE),
+    STARS_NATURAL(Look.Purpose.SKY, "eye/stars-natural", "Stars above the horizon under the natural sky", Unit.STARS),
+    STARS(Look.Purpose.SKY, "eye/stars", "Stars above the horizon with the lights", Unit.STARS);
+
+    private final Look.@Nullable Purpose purpose;
+    private final String path;
+    private final String title;
+    private final Unit unit;
+
+    Measure(Look.@Nullable Purpose purpose, String path, String title, Unit unit) {
+        this.purpose = purpose;
+        this.path = path;
+        this.title = title;
+        this.unit = unit;
+    }
+
+    /** Whether it belongs to the place as a whole rather than to a direction looked in. */
+    boolean isOfPlace() {
+        return purpose == null;
+    }
+
+    boolean isOf(Look look) {
+        boolean counted = this == STARS || this == STARS_NATURAL;
+        return purpose == look.purpose() && (!counted || look.id().equals(Look.ZENITH));
+    }
+
+    String title() {
+        return title;
+    }
+
+    Unit unit() {
+        return unit;
+    }
+
+    /** Its path within a place. */
+    String path(Look look) {
+        return look.id() + "/" + path;
+    }
+
+    String path() {
+        return path;
+    }
+}
