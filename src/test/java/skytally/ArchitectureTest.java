@@ -39,6 +39,7 @@ class ArchitectureTest {
             spectrum   :
             glare      :
             naturalsky : spectrum
+            eye        : spectrum
             """);
 
     /** What people see and keep. */
