@@ -1,6 +1,7 @@
 package skytally.assessment;
 
 import java.util.Collections;
+import java.util.Comparator;
 import java.util.LinkedHashMap;
 import java.util.List;
 import java.util.Map;
@@ -69,7 +70,7 @@ public record Assessment(
     public Optional<Influence> strongest(Figure figure) {
         return influences.stream()
                 .filter(influence -> influence.figure().equals(figure.key()) && influence.strength() > 0)
-                .max(java.util.Comparator.comparingDouble(Influence::strength));
+                .max(Comparator.comparingDouble(Influence::strength));
     }
 
     public boolean has(Topic topic) {

@@ -1,9 +1,9 @@
 package skytally.assessment;
 
+import java.util.function.DoubleUnaryOperator;
 import skytally.atmosphere.Atmosphere;
 import skytally.atmosphere.DirectPath;
 import skytally.atmosphere.Molecules;
-import skytally.spectrum.Passband;
 import skytally.spectrum.Spectrum;
 
 /**
@@ -26,38 +26,27 @@ final class LuminousTransmission {
     private final double skewAAA;
 
     LuminousTransmission(Spectrum spectrum, Atmosphere air) {
-        double[] nm = spectrum.nodeWavelengthsNm();
-        double[] weights = spectrum.nodeWeights(Passband.PHOTOPIC);
-        double all = 0;
-        double sumM = 0;
-        double sumA = 0;
-        for (int i = 0; i < nm.length; i++) {
-            all += weights[i];
-            sumM += weights[i] * air.molecularOpticalDepth(nm[i]);
-            sumA += weights[i] * air.aerosol().opticalDepth(nm[i]);
-        }
-        meanM = sumM / all;
-        meanA = sumA / all;
-        double[] moments = new double[7];
-        for (int i = 0; i < nm.length; i++) {
-            double w = weights[i] / all;
-            double m = air.molecularOpticalDepth(nm[i]) - meanM;
-            double a = air.aerosol().opticalDepth(nm[i]) - meanA;
-            moments[0] += w * m * m;
-            moments[1] += w * m * a;
-            moments[2] += w * a * a;
-            moments[3] += w * m * m * m;
-            moments[4] += w * m * m * a;
-            moments[5] += w * m * a * a;
-            moments[6] += w * a * a * a;
-        }
-        varMM = moments[0];
-        varMA = moments[1];
-        varAA = moments[2];
-        skewMMM = moments[3];
-        skewMMA = moments[4];
-        skewMAA = moments[5];
-        skewAAA = moments[6];
+        SpectralSum eye = SpectralSum.of(spectrum);
+        DoubleUnaryOperator molecules = air::molecularOpticalDepth;
+        DoubleUnaryOperator haze = air.aerosol()::opticalDepth;
+        double mM = eye.photopicMean(molecules);
+        double mA = eye.photopicMean(haze);
+        DoubleUnaryOperator m = nm -> molecules.applyAsDouble(nm) - mM;
+        DoubleUnaryOperator a = nm -> haze.applyAsDouble(nm) - mA;
+        meanM = mM;
+        meanA = mA;
+        varMM = eye.photopicMean(nm -> power(m, nm, 2));
+        varMA = eye.photopicMean(nm -> power(m, nm, 1) * power(a, nm, 1));
+        varAA = eye.photopicMean(nm -> power(a, nm, 2));
+        skewMMM = eye.photopicMean(nm -> power(m, nm, 3));
+        skewMMA = eye.photopicMean(nm -> power(m, nm, 2) * power(a, nm, 1));
+        skewMAA = eye.photopicMean(nm -> power(m, nm, 1) * power(a, nm, 2));
+        skewAAA = eye.photopicMean(nm -> power(a, nm, 3));
+    }
+
+    private static double power(DoubleUnaryOperator depth, double nm, int exponent) {
+        double value = depth.applyAsDouble(nm);
+        return exponent == 1 ? value : exponent == 2 ? value * value : value * value * value;
     }
 
     /**

@@ -3,12 +3,14 @@ package skytally.assessment;
 import java.util.ArrayList;
 import java.util.Arrays;
 import java.util.List;
+import skytally.atmosphere.AirMass;
 import skytally.citation.Bibliography;
 import skytally.citation.Citation;
 import skytally.eye.PointVisibility;
 import skytally.glare.VeilingLuminance;
 import skytally.naturalsky.NaturalBackground;
 import skytally.notation.QuantityFormat;
+import skytally.photometry.SurfaceBrightness;
 import skytally.scene.Known;
 import skytally.scene.Lamp;
 import skytally.scene.OpenScene;
@@ -255,8 +257,7 @@ final class Workings {
                 List.of("This air's own k_V is "
                         + QuantityFormat.decimals(own, 3).plain() + ": with it the star is "
                         + QuantityFormat.decimals(numbers.get(from) - own, 2).plain() + " overhead and "
-                        + QuantityFormat.decimals(
-                                        numbers.get(from) - own * skytally.atmosphere.AirMass.atAltitude(30), 2)
+                        + QuantityFormat.decimals(numbers.get(from) - own * AirMass.atAltitude(30), 2)
                                 .plain()
                         + " at 30° altitude."));
     }
@@ -529,7 +530,7 @@ final class Workings {
 
     private Working limit(int look, Measure from, Measure to) {
         double background = PlaceNumbers.ZERO_POINT
-                .luminance(new skytally.photometry.SurfaceBrightness(numbers.get(from, look)))
+                .luminance(new SurfaceBrightness(numbers.get(from, look)))
                 .candelaPerSquareMetre();
         double toAir = numbers.get(to, look) - numbers.air().extinctionMagPerAirMass();
         return new Working(
@@ -634,6 +635,6 @@ final class Workings {
     }
 
     private static String written(double value, String unit) {
-        return QuantityFormat.significant(value, FIGURES).plain() + unit.replace(' ', '\u00a0');
+        return QuantityFormat.atMost(value, FIGURES).plain() + unit.replace(' ', '\u00a0');
     }
 }

@@ -42,6 +42,13 @@ public final class QuantityFormat {
         return new Written(grouped(withFigures(rounded.movePointLeft(power), figures)), power);
     }
 
+    /** Rounded to a number of significant figures at most, trailing noughts left out ({@code 0.2}), as inputs are. */
+    public static Written atMost(double value, int figures) {
+        Written full = significant(value, figures);
+        String digits = full.digits();
+        return digits.indexOf('.') < 0 ? full : new Written(digits.replaceAll("\\.?0+$", ""), full.power());
+    }
+
     /**
      * Rounded to a number of decimals, as magnitudes and angles are written.
      *
