@@ -50,7 +50,9 @@ class ArchitectureTest {
 
     /** What people see and keep. */
     private static final Map<String, List<String>> FEATURES = rooms("""
-            firstlook  : spectrum luminaire atmosphere scene assessment charts
+            storage    :
+            web        :
+            firstlook  : spectrum luminaire atmosphere scene assessment charts web
             """);
 
     /** Beside the JDK, the core may use these and no others. */

@@ -9,12 +9,13 @@ import skytally.photometry.ZeroPoint;
  * A light of nature that people know, as a rung to compare with.
  *
  * @param id       its name for machines, such as {@code full-moon}
- * @param name     its name for people
+ * @param name     its name for people, as a label
+ * @param said     the same within a sentence
  * @param kind     where its light is taken
  * @param light    how bright
  * @param citation where that came from
  */
-public record NaturalAnchor(String id, String name, Kind kind, Light light, Citation citation) {
+public record NaturalAnchor(String id, String name, String said, Kind kind, Light light, Citation citation) {
 
     /** Where the light is taken. */
     public enum Kind {

@@ -22,7 +22,7 @@ import skytally.photometry.Magnitude;
 public final class NaturalAnchors {
 
     private static final String FILE = "/anchors.csv";
-    private static final String HEADINGS = "id,name,kind,magnitude,altitude_deg,air_mass,lux,source";
+    private static final String HEADINGS = "id,name,said,kind,magnitude,altitude_deg,air_mass,lux,source";
     private static final List<NaturalAnchor> ANCHORS = read();
 
     private NaturalAnchors() {}
@@ -55,25 +55,26 @@ public final class NaturalAnchors {
 
     private static NaturalAnchor anchor(String row) {
         String[] cells = row.split(",", -1);
-        if (cells.length != 8) {
-            throw new IllegalStateException(FILE + ": eight cells are needed in \"" + row + "\"");
+        if (cells.length != 9) {
+            throw new IllegalStateException(FILE + ": nine cells are needed in \"" + row + "\"");
         }
         return new NaturalAnchor(
                 cells[0],
                 cells[1],
-                Kind.valueOf(cells[2].toUpperCase(Locale.ROOT)),
+                cells[2],
+                Kind.valueOf(cells[3].toUpperCase(Locale.ROOT)),
                 light(cells, row),
-                Bibliography.cite(cells[7]));
+                Bibliography.cite(cells[8]));
     }
 
     private static Light light(String[] cells, String row) {
-        boolean byMagnitude = !cells[3].isEmpty();
-        if (byMagnitude == !cells[6].isEmpty()) {
+        boolean byMagnitude = !cells[4].isEmpty();
+        if (byMagnitude == !cells[7].isEmpty()) {
             throw new IllegalStateException(FILE + ": either a magnitude or lux is needed in \"" + row + "\"");
         }
         return byMagnitude
-                ? new ThroughAir(new Magnitude(number(cells[3])), number(cells[4]), number(cells[5]))
-                : new InLux(new Illuminance(number(cells[6])));
+                ? new ThroughAir(new Magnitude(number(cells[4])), number(cells[5]), number(cells[6]))
+                : new InLux(new Illuminance(number(cells[7])));
     }
 
     private static double number(String cell) {

@@ -117,4 +117,9 @@ record Sentence(Map<Blank, String> texts, Set<Blank> guessed) {
         guesses().forEach(guess -> likely.put(guess.blank(), guess.likely()));
         return with(likely);
     }
+
+    /** The same sentence with nothing guessed: as if every value had been typed. */
+    Sentence settled() {
+        return new Sentence(texts, Set.of());
+    }
 }

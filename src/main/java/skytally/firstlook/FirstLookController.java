@@ -1,0 +1,69 @@
+package skytally.firstlook;
+
+import jakarta.servlet.http.HttpServletResponse;
+import java.util.List;
+import java.util.Locale;
+import org.springframework.context.MessageSource;
+import org.springframework.http.HttpHeaders;
+import org.springframework.http.HttpStatus;
+import org.springframework.http.MediaType;
+import org.springframework.http.ResponseEntity;
+import org.springframework.stereotype.Controller;
+import org.springframework.util.MultiValueMap;
+import org.springframework.web.bind.annotation.GetMapping;
+import org.springframework.web.bind.annotation.RequestParam;
+import org.springframework.web.servlet.ModelAndView;
+import org.springframework.web.servlet.view.RedirectView;
+import skytally.web.InvalidInputException;
+import skytally.web.Switches;
+
+/** The first look: the sentence in the address, the answer on the same page or, for programs, as data. */
+@Controller
+class FirstLookController {
+
+    private final Answers answers;
+    private final MessageSource messages;
+
+    FirstLookController(Answers answers, MessageSource messages) {
+        this.answers = answers;
+        this.messages = messages;
+    }
+
+    @GetMapping(path = "/", produces = MediaType.TEXT_HTML_VALUE)
+    ModelAndView page(
+            @RequestParam MultiValueMap<String, String> sent, Switches switches, HttpServletResponse response) {
+        response.addHeader(HttpHeaders.VARY, HttpHeaders.ACCEPT);
+        if (sent.containsKey(SentenceAddress.FORM)) {
+            RedirectView plain = new RedirectView(SentenceAddress.plainAddress(sent));
+            plain.setStatusCode(HttpStatus.SEE_OTHER);
+            plain.setExposeModelAttributes(false);
+            plain.setExpandUriTemplateVariables(false);
+            return new ModelAndView(plain);
+        }
+        SentenceReader.Result read = SentenceReader.read(sent);
+        ModelAndView page = new ModelAndView("firstlook/page");
+        page.addObject("form", SentenceForm.of(sent, read, switches.units()));
+        read.sentence()
+                .map(answers::to)
+                .ifPresentOrElse(
+                        answer -> page.addObject("answer", FirstLookPage.of(answer, switches.units())),
+                        () -> page.setStatus(HttpStatus.BAD_REQUEST));
+        return page;
+    }
+
+    @GetMapping(path = "/", produces = MediaType.APPLICATION_JSON_VALUE)
+    ResponseEntity<FirstLookJson> data(@RequestParam MultiValueMap<String, String> sent) {
+        SentenceReader.Result read = SentenceReader.read(sent);
+        Sentence sentence = read.sentence().orElseThrow(() -> new InvalidInputException(faults(read)));
+        String caution = messages.getMessage("caution", null, Locale.ENGLISH);
+        return ResponseEntity.ok()
+                .header(HttpHeaders.VARY, HttpHeaders.ACCEPT)
+                .body(FirstLookJson.of(answers.to(sentence), caution));
+    }
+
+    private static List<InvalidInputException.Fault> faults(SentenceReader.Result read) {
+        return read.faults().stream()
+                .map(fault -> new InvalidInputException.Fault(fault.blank().field(), fault.message()))
+                .toList();
+    }
+}

@@ -1,0 +1,173 @@
+package skytally.firstlook;
+
+import java.util.ArrayList;
+import java.util.Comparator;
+import java.util.LinkedHashMap;
+import java.util.List;
+import java.util.Map;
+import skytally.charts.Ladder;
+import skytally.citation.Citation;
+import skytally.eye.NaturalAnchor;
+import skytally.eye.NaturalAnchors;
+import skytally.notation.QuantityFormat;
+import skytally.photometry.Illuminance;
+import skytally.photometry.ZeroPoint;
+import skytally.web.Switches.Units;
+
+/**
+ * The ladder of light at the eye, as a picture, a sentence and a table.
+ *
+ * @param svg     the picture
+ * @param says    the picture in a sentence or two
+ * @param rows    the same as a table, brightest first
+ * @param sources what the letters lead to
+ */
+record LadderPicture(String svg, String says, List<Row> rows, List<Source> sources) {
+
+    /** One light: a natural one, or one of the proposal. */
+    record Row(
+            String name,
+            Quantity light,
+            Quantity other,
+            String magnitude,
+            String source,
+            boolean proposed,
+            double lux) {}
+
+    /** A letter on the picture and what it leads to. */
+    record Source(String letter, String reference, String standing) {}
+
+    private static final ZeroPoint ZERO_POINT = ZeroPoint.TRADITIONAL;
+
+    static LadderPicture of(Answer answer, Units units) {
+        Map<Citation, String> letters = new LinkedHashMap<>();
+        List<Row> rows = new ArrayList<>();
+        List<Ladder.Rung> rungs = new ArrayList<>();
+        for (NaturalAnchor anchor : brightestFirst()) {
+            String letter = letters.computeIfAbsent(
+                    anchor.citation(), citation -> Character.toString((char) ('a' + letters.size())));
+            double lux = anchor.illuminance(ZERO_POINT).lux();
+            boolean onGround = anchor.kind() == NaturalAnchor.Kind.GROUND;
+            rungs.add(new Ladder.Rung(anchor.name(), lux, QuantityFormat.significant(lux, 2), onGround, letter));
+            String name = anchor.name() + (onGround ? ", on level ground" : "");
+            rows.add(row(name, lux, units, letter, false));
+        }
+        List<Ladder.Mark> marks = marks(answer);
+        for (Ladder.Mark mark : marks) {
+            rows.add(row(mark.name(), mark.lux(), units, "your sentence", true));
+        }
+        rows.sort(Comparator.comparingDouble(Row::lux).reversed());
+        String says = says(answer, rows, units);
+        List<Source> sources = letters.entrySet().stream()
+                .map(each -> new Source(
+                        each.getValue(),
+                        each.getKey().reference(),
+                        each.getKey().standing().words()))
+                .toList();
+        return new LadderPicture(new Ladder("ladder", says, rungs, marks, ZERO_POINT).svg(), says, rows, sources);
+    }
+
+    private static List<NaturalAnchor> brightestFirst() {
+        return NaturalAnchors.all().stream()
+                .sorted(Comparator.comparing((NaturalAnchor anchor) -> anchor.illuminance(ZERO_POINT))
+                        .reversed())
+                .toList();
+    }
+
+    private static List<Ladder.Mark> marks(Answer answer) {
+        int count = answer.sentence().count();
+        String all = count == 1
+                ? "This light"
+                : "These " + QuantityFormat.decimals(count, 0).digits() + " lights";
+        List<Ladder.Mark> marks = new ArrayList<>();
+        answer.figure("direct/illuminance").range().ifPresent(range -> {
+            if (range.likely() > 0) {
+                marks.add(new Ladder.Mark(
+                        all, range.likely(), range.low(), range.high(), withMagnitude(range.likely()), false));
+            }
+        });
+        double other = answer.otherFigure("direct/illuminance").likely();
+        if (other > 0) {
+            double now = answer.figure("direct/illuminance").likely();
+            Ladder.Line says = now > 0
+                    ? new Ladder.Line(
+                            QuantityFormat.significant(other, 2),
+                            " lx, " + QuantityFormat.significant(other / now, 2).plain() + " times as much")
+                    : withMagnitude(other);
+            marks.add(new Ladder.Mark(otherName(answer), other, other, other, says, true));
+        }
+        return marks;
+    }
+
+    private static String otherName(Answer answer) {
+        double usual = answer.sentence().shape().usualTiltDeg();
+        return answer.otherTilt() == usual
+                ? "The same, hung as described"
+                : "The same, tilted "
+                        + QuantityFormat.atMost(answer.otherTilt() - usual, 3).plain()
+                        + (usual == 0 ? "° toward you" : "° further up");
+    }
+
+    private static Ladder.Line withMagnitude(double lux) {
+        return new Ladder.Line(QuantityFormat.significant(lux, 2), " lx, magnitude " + magnitude(lux));
+    }
+
+    private static Row row(String name, double lux, Units units, String source, boolean proposed) {
+        return new Row(
+                name,
+                Quantity.light(lux, 3, units),
+                Quantity.lightOtherwise(lux, 3, units),
+                magnitude(lux),
+                source,
+                proposed,
+                lux);
+    }
+
+    private static String magnitude(double lux) {
+        return QuantityFormat.decimals(
+                        ZERO_POINT.magnitude(new Illuminance(lux)).value(), 1)
+                .digits();
+    }
+
+    private static String says(Answer answer, List<Row> rows, Units units) {
+        StringBuilder says =
+                new StringBuilder("A logarithmic scale of light at the eye, from a billionth of a lux to ten lux.");
+        for (int i = 0; i < rows.size(); i++) {
+            Row row = rows.get(i);
+            if (row.proposed()) {
+                says.append(' ')
+                        .append(row.name())
+                        .append(verb(answer, row))
+                        .append(row.light().plain())
+                        .append(between(rows, i));
+            }
+        }
+        if (rows.stream().noneMatch(Row::proposed)) {
+            says.append(" No direct light of the proposal stands on it.");
+        }
+        return says.toString();
+    }
+
+    private static String verb(Answer answer, Row row) {
+        boolean one = answer.sentence().count() == 1 || row.name().startsWith("The same");
+        return one ? ": " : " together: ";
+    }
+
+    private static String between(List<Row> rows, int at) {
+        String above = neighbour(rows, at, -1);
+        String below = neighbour(rows, at, 1);
+        if (above.isEmpty()) {
+            return ", above every natural light shown.";
+        }
+        return below.isEmpty() ? ", below every natural light shown." : ", between " + below + " and " + above + ".";
+    }
+
+    private static String neighbour(List<Row> rows, int at, int step) {
+        for (int i = at + step; i >= 0 && i < rows.size(); i += step) {
+            if (!rows.get(i).proposed()) {
+                return rows.get(i).name();
+            }
+        }
+        return "";
+    }
+}

@@ -1,0 +1,73 @@
+package skytally.firstlook;
+
+import skytally.notation.QuantityFormat;
+import skytally.notation.Written;
+import skytally.photometry.Illuminance;
+import skytally.web.Switches.Units;
+
+/**
+ * A number with its unit, ready to be printed.
+ *
+ * @param number written out
+ * @param unit   as printed after it
+ */
+record Quantity(Written number, String unit) {
+
+    private static final double METRES_PER_FOOT = 0.3048;
+
+    static Quantity lux(double lux, int figures) {
+        return new Quantity(QuantityFormat.significant(lux, figures), "lx");
+    }
+
+    static Quantity footcandles(double lux, int figures) {
+        return new Quantity(QuantityFormat.significant(new Illuminance(lux).footcandles(), figures), "fc");
+    }
+
+    /** In the unit the reader asked for. */
+    static Quantity light(double lux, int figures, Units units) {
+        return units == Units.US ? footcandles(lux, figures) : lux(lux, figures);
+    }
+
+    /** In the other unit. */
+    static Quantity lightOtherwise(double lux, int figures, Units units) {
+        return units == Units.US ? lux(lux, figures) : footcandles(lux, figures);
+    }
+
+    static Quantity length(double metres, int figures, Units units) {
+        boolean feet = units == Units.US;
+        double value = feet ? metres / METRES_PER_FOOT : metres;
+        // whole metres are not rounded away: 1 234 m stays 1 234 m
+        Written written =
+                value >= 1000 ? QuantityFormat.decimals(value, 0) : QuantityFormat.atMost(value, Math.max(figures, 3));
+        return new Quantity(written, feet ? "ft" : "m");
+    }
+
+    /** Luminance in the step that leaves the number readable: µcd/m², mcd/m² or cd/m². */
+    static Quantity luminance(double cdM2, int figures) {
+        if (cdM2 == 0 || cdM2 >= 0.1) {
+            return new Quantity(QuantityFormat.significant(cdM2, figures), "cd/m²");
+        }
+        return cdM2 >= 1e-4
+                ? new Quantity(QuantityFormat.significant(cdM2 * 1e3, figures), "mcd/m²")
+                : new Quantity(QuantityFormat.significant(cdM2 * 1e6, figures), "µcd/m²");
+    }
+
+    static Quantity magnitude(double value, int decimals) {
+        return new Quantity(QuantityFormat.decimals(value, decimals), "mag");
+    }
+
+    static Quantity skyBrightness(double value, int decimals) {
+        return new Quantity(QuantityFormat.decimals(value, decimals), "mag/arcsec²");
+    }
+
+    /** All in one piece of text, number and unit kept on one line. */
+    String plain() {
+        String gap = unit.isEmpty() || unit.startsWith("°") ? "" : "\u00a0";
+        return number.plain() + gap + unit;
+    }
+
+    @Override
+    public String toString() {
+        return plain();
+    }
+}

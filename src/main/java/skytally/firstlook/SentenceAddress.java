@@ -1,0 +1,97 @@
+package skytally.firstlook;
+
+import java.math.BigDecimal;
+import java.math.MathContext;
+import java.util.HashMap;
+import java.util.List;
+import java.util.Map;
+import org.jspecify.annotations.Nullable;
+import org.springframework.util.MultiValueMap;
+import org.springframework.web.util.UriComponentsBuilder;
+import skytally.notation.NumberReader;
+
+/**
+ * Turns what the form sends into the plain address of the sentence: blanks that may be left open and were are left
+ * out, feet become metres, and what cannot be read is carried along as typed, to be shown again with what is wrong.
+ */
+final class SentenceAddress {
+
+    /** Marks a request that comes from the form. */
+    static final String FORM = "form";
+
+    /** A button that hangs the lights another way: the tilt in degrees, or nothing for as described. */
+    static final String TILT_TO = "tiltTo";
+
+    /** The blanks the form asks for outright; the others may be left empty and are guessed then. */
+    private static final List<Blank> ASKED_FOR = List.of(
+            Blank.COUNT, Blank.LUMENS, Blank.SPECTRAL_CLASS, Blank.SHAPE, Blank.MOUNTING_HEIGHT, Blank.DISTANCE);
+
+    private static final List<String> SWITCHES = List.of("units", "theme");
+    private static final BigDecimal METRES_PER_FOOT = new BigDecimal("0.3048");
+    private static final MathContext SHOWN_FEET = new MathContext(7);
+
+    private SentenceAddress() {}
+
+    static boolean isAskedFor(Blank blank) {
+        return ASKED_FOR.contains(blank);
+    }
+
+    /** Name of a length's field on a page in feet. */
+    static String feetField(Blank blank) {
+        return blank.field().substring(0, blank.field().length() - 1) + "Ft";
+    }
+
+    /** A length in metres as the feet to show in its field. */
+    static String feet(String metres) {
+        return plain(new BigDecimal(metres).divide(METRES_PER_FOOT, SHOWN_FEET));
+    }
+
+    static String plainAddress(MultiValueMap<String, String> sent) {
+        UriComponentsBuilder address = UriComponentsBuilder.fromPath("/");
+        Map<String, Object> values = new HashMap<>();
+        for (Blank blank : Blank.values()) {
+            String text = text(blank, sent);
+            if (text != null && !(text.isBlank() && !isAskedFor(blank))) {
+                address.queryParam(blank.field(), "{" + blank.field() + "}");
+                values.put(blank.field(), text);
+            }
+        }
+        for (String name : SWITCHES) {
+            String word = sent.getFirst(name);
+            if (word != null) {
+                address.queryParam(name, "{" + name + "}");
+                values.put(name, word);
+            }
+        }
+        return address.encode().buildAndExpand(values).toUriString();
+    }
+
+    private static @Nullable String text(Blank blank, MultiValueMap<String, String> sent) {
+        if (blank == Blank.TILT && sent.containsKey(TILT_TO)) {
+            return sent.getFirst(TILT_TO);
+        }
+        if (blank.isLength() && sent.containsKey(feetField(blank))) {
+            String feet = sent.getFirst(feetField(blank));
+            return feet == null ? null : metres(feet);
+        }
+        return sent.getFirst(blank.field());
+    }
+
+    /** Feet as metres; what is no number stays as it was typed. */
+    private static String metres(String feet) {
+        NumberReader.Reading reading = NumberReader.read(feet, false);
+        return reading instanceof NumberReader.Number number && isOrdinary(number.value())
+                ? plain(number.value().multiply(METRES_PER_FOOT))
+                : feet;
+    }
+
+    /** Short enough in plain notation to be carried in an address. */
+    static boolean isOrdinary(BigDecimal value) {
+        return Math.abs((long) value.scale()) < 40 && value.precision() < 40;
+    }
+
+    private static String plain(BigDecimal value) {
+        BigDecimal shortest = value.stripTrailingZeros();
+        return (shortest.scale() < 0 ? shortest.setScale(0) : shortest).toPlainString();
+    }
+}
