@@ -7,6 +7,7 @@ import org.junit.jupiter.api.DisplayName;
 import org.junit.jupiter.api.Test;
 import org.junit.jupiter.params.ParameterizedTest;
 import org.junit.jupiter.params.provider.CsvSource;
+import skytally.glare.VeilingLuminance.CieGeneral;
 import skytally.photometry.Illuminance;
 import skytally.photometry.Luminance;
 
@@ -23,12 +24,12 @@ class VeilingLuminanceFrozenTest {
             60,  0.0037370628740740737
             """)
     void whatTheToolPrintsByDefault(double angleDeg, double perLux) {
-        assertThat(VeilingLuminance.DEFAULT.perLux(angleDeg)).isCloseTo(perLux, within(1e-12 * perLux));
+        assertThat(CieGeneral.DEFAULT.perLux(angleDeg)).isCloseTo(perLux, within(1e-12 * perLux));
     }
 
     @Test
     void angleOfEquality() {
-        assertThat(VeilingLuminance.DEFAULT
+        assertThat(CieGeneral.DEFAULT
                         .angleWhereVeilEquals(new Illuminance(0.01), new Luminance(1.7e-4))
                         .angleDeg())
                 .hasValueCloseTo(21.27699399764607, within(2e-11));
