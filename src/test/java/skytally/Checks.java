@@ -7,6 +7,7 @@ import java.io.BufferedReader;
 import java.io.IOException;
 import java.io.InputStreamReader;
 import java.io.UncheckedIOException;
+import java.math.BigDecimal;
 import java.nio.charset.StandardCharsets;
 import java.util.ArrayList;
 import java.util.List;
@@ -18,9 +19,12 @@ import java.util.stream.Stream;
 /**
  * Rows of a table in {@code src/test/resources/reference} with the columns id, quantity, inputs, expected, tolerance and
  * source. Several expected values, and their tolerances, are parted by semicolons. A tolerance is relative where it says
- * {@code rel} or {@code %}, else in the row's unit, and never tighter than half of the last digit printed.
+ * {@code rel} or {@code %}, else in the row's unit, and never tighter than half of the last digit of a rounded number.
  */
 public final class Checks {
+
+    /** A number with fewer digits is taken as exact, such as 100 or −2.5. */
+    private static final int ROUNDED_FROM_DIGITS = 5;
 
     private static final Pattern NUMBER = Pattern.compile("[-+]?\\d+(\\.\\d+)?([eE][-+]?\\d+)?");
 
@@ -71,7 +75,10 @@ public final class Checks {
         }
 
         private static double halfOfLastDigit(String printed) {
-            return 0.5 * new java.math.BigDecimal(printed.strip()).ulp().doubleValue() * (1 + 1e-9);
+            BigDecimal value = new BigDecimal(printed.strip());
+            return value.precision() < ROUNDED_FROM_DIGITS
+                    ? 0
+                    : 0.5 * value.ulp().doubleValue() * (1 + 1e-9);
         }
 
         @Override

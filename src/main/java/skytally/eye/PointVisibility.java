@@ -1,5 +1,7 @@
 package skytally.eye;
 
+import skytally.citation.Bibliography;
+import skytally.citation.Citation;
 import skytally.photometry.Illuminance;
 import skytally.photometry.Luminance;
 import skytally.photometry.LuminousIntensity;
@@ -9,13 +11,54 @@ import skytally.photometry.LuminousIntensity;
  * <pre>
  *   E(d) = I e^(−k d) / d²
  * </pre>
- * and it is seen while E exceeds a threshold. Thresholds differ by 35 between a light reliably noticed and one just made
+ * and it is seen while E exceeds a threshold. Thresholds differ by 25 to 35 between a light reliably noticed and one just made
  * out by somebody who knows where to look, so both are to be shown. Hills and the curve of the Earth come on top.
  */
 public final class PointVisibility {
 
     /** A light reliably noticed at night on a dark background: the practice of navigation (IALA, COLREG Annex I). */
     public static final Illuminance NAVIGATION_PRACTICE = new Illuminance(2e-7);
+
+    /** Which question a threshold answers, in the order they are shown. */
+    public enum Threshold {
+        RELIABLY_NOTICED("reliably noticed at night", "navigation-practice") {
+            @Override
+            public Illuminance on(Luminance background) {
+                return NAVIGATION_PRACTICE;
+            }
+        },
+        JUST_MADE_OUT("just made out by a dark-adapted eye that knows where to look", "crumey-2014") {
+            @Override
+            public Illuminance on(Luminance background) {
+                return detection(background);
+            }
+        },
+        JUST_MADE_OUT_BY_HECHT("the same, by an older formula", "hecht-schaefer") {
+            @Override
+            public Illuminance on(Luminance background) {
+                return detectionByHecht(background);
+            }
+        };
+
+        private final String words;
+        private final String source;
+
+        Threshold(String words, String source) {
+            this.words = words;
+            this.source = source;
+        }
+
+        /** The least illuminance at the eye; the background counts where the threshold depends on it. */
+        public abstract Illuminance on(Luminance background);
+
+        public String words() {
+            return words;
+        }
+
+        public Citation citation() {
+            return Bibliography.cite(source);
+        }
+    }
 
     private static final double HECHT_BRANCH_NL = 1500;
 

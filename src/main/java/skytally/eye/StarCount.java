@@ -30,6 +30,11 @@ public final class StarCount {
 
     private StarCount() {}
 
+    /** True for a limit that can be counted, −1 to 8. */
+    public static boolean covers(Magnitude limit) {
+        return limit.value() >= BRIGHTEST && limit.value() <= FAINTEST;
+    }
+
     /**
      * On the whole sphere, without extinction.
      *
@@ -38,7 +43,7 @@ public final class StarCount {
      */
     public static double wholeSky(Magnitude limit) {
         double m = limit.value();
-        if (!(m >= BRIGHTEST && m <= FAINTEST)) {
+        if (!covers(limit)) {
             throw new IllegalArgumentException("Stars are counted from magnitude −1 to 8, not to " + m);
         }
         return m <= FIT_FROM ? counted(m) : Math.max(COUNTED[COUNTED.length - 1], fitted(m));

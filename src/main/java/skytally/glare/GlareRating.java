@@ -24,6 +24,8 @@ public record GlareRating(double value) {
     }
 
     /**
+     * The rating from the two veils.
+     *
      * @param veilOfLamps       Stiles-Holladay, summed over the luminaires
      * @param veilOfSurroundings from {@link #veilOfSurroundings}, more than 0
      */

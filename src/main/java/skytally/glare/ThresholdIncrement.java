@@ -20,9 +20,10 @@ public final class ThresholdIncrement {
     private ThresholdIncrement() {}
 
     /**
+     * The increment in per cent.
+     *
      * @param veil           summed over the luminaires
      * @param averageOfRoad  mean road luminance, more than 0.05 cd/m²
-     * @return per cent
      */
     public static double percent(Luminance veil, Luminance averageOfRoad) {
         return veil.candelaPerSquareMetre() * percentPerVeil(averageOfRoad);

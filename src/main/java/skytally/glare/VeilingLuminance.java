@@ -16,9 +16,6 @@ import skytally.photometry.Luminance;
  */
 public sealed interface VeilingLuminance {
 
-    /** What the tool prints: CIE General for an observer of 35 with brown eyes. */
-    VeilingLuminance DEFAULT = new CieGeneral(35, 0.5);
-
     /** Beyond this, brow and cheek and the pigment of the eye decide; no veil is printed. Degrees. */
     double WIDEST_PRINTED_DEG = 60;
 
@@ -209,6 +206,9 @@ public sealed interface VeilingLuminance {
      * @param pigment  p: 0 very dark, 0.5 brown, 1.0 blue, 1.2 very light eyes; matters above 30 degrees
      */
     record CieGeneral(double ageYears, double pigment) implements VeilingLuminance {
+
+        /** What the tool prints: an observer of 35 with brown eyes. */
+        public static final CieGeneral DEFAULT = new CieGeneral(35, 0.5);
 
         private static final AngleRange VALIDITY = new AngleRange(0.1, 100);
 

@@ -81,7 +81,7 @@ public final class SpectralClasses {
         return Spectrum.of(components);
     }
 
-    private static Component component(Table.Row row) {
+    static Component component(Table.Row row) {
         List<String> cells = row.cells();
         if (cells.size() != 6) {
             throw row.fault("six cells are needed, not " + cells.size());

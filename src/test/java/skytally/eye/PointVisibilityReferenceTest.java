@@ -15,7 +15,9 @@ import org.junit.jupiter.params.provider.CsvSource;
 import org.junit.jupiter.params.provider.MethodSource;
 import org.junit.jupiter.params.provider.ValueSource;
 import skytally.Checks;
+import skytally.eye.PointVisibility.Threshold;
 import skytally.photometry.Illuminance;
+import skytally.photometry.Luminance;
 import skytally.photometry.LuminousIntensity;
 import skytally.photometry.SurfaceBrightness;
 import skytally.photometry.ZeroPoint;
@@ -130,6 +132,19 @@ class PointVisibilityReferenceTest {
         Checks.row(CHECKS, "A-beta20").isMatchedBy(VisualRange.KOSCHMIEDER.extinctionPerMetre(20_000) * 1000);
         Checks.row(CHECKS, "A-Vmet").isMatchedBy(VisualRange.KOSCHMIEDER.rangeM(0.0787998e-3) / 1000);
         assertThat(VisualRange.WEATHER_REPORT.extinctionPerMetre(1)).isCloseTo(2.996, within(0.0005));
+    }
+
+    /** 25 (Crumey) to 35 (Hecht) between a light reliably noticed and one just made out, under a natural sky. */
+    @Test
+    void thresholdsAnswerDifferentQuestions() {
+        Luminance sky = ZeroPoint.TRADITIONAL.luminance(new SurfaceBrightness(22));
+        double noticed = Threshold.RELIABLY_NOTICED.on(sky).lux();
+        assertThat(noticed / Threshold.JUST_MADE_OUT.on(sky).lux()).isCloseTo(25, within(0.5));
+        assertThat(noticed / Threshold.JUST_MADE_OUT_BY_HECHT.on(sky).lux()).isCloseTo(35, within(0.5));
+        for (Threshold threshold : Threshold.values()) {
+            assertThat(threshold.words()).isNotBlank();
+            assertThat(threshold.citation().reference()).isNotBlank();
+        }
     }
 
     @Test

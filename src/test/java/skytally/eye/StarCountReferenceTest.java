@@ -76,5 +76,7 @@ class StarCountReferenceTest {
     @ValueSource(doubles = {-1.01, 8.01})
     void refusesWhatIsNotCounted(double m) {
         assertThatThrownBy(() -> StarCount.wholeSky(new Magnitude(m))).hasMessageContaining("−1 to 8");
+        assertThat(StarCount.covers(new Magnitude(m))).isFalse();
+        assertThat(StarCount.covers(new Magnitude(6))).isTrue();
     }
 }

@@ -78,7 +78,7 @@ class VeilingLuminanceReferenceTest {
     @ParameterizedTest(name = "{0}")
     @MethodSource("veils")
     void veilAsASky(Checks.Row row) {
-        VeilingLuminance form = row.id().startsWith("V-veilg") ? VeilingLuminance.DEFAULT : StilesHolladay.CLASSIC;
+        VeilingLuminance form = row.id().startsWith("V-veilg") ? CieGeneral.DEFAULT : StilesHolladay.CLASSIC;
         Luminance veil = form.from(facingLamp(row), row.input("theta"));
         row.isMatchedBy(
                 ZeroPoint.TRADITIONAL.surfaceBrightness(veil).magArcsec2(),

@@ -81,7 +81,7 @@ class VeilingLuminanceTest {
 
     @Test
     void isNotComparedWithDarkness() {
-        assertThatThrownBy(() -> VeilingLuminance.DEFAULT.angleWhereVeilEquals(new Illuminance(1), new Luminance(0)))
+        assertThatThrownBy(() -> CieGeneral.DEFAULT.angleWhereVeilEquals(new Illuminance(1), new Luminance(0)))
                 .isInstanceOf(IllegalArgumentException.class);
     }
 

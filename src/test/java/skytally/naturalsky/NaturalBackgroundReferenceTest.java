@@ -15,6 +15,7 @@ import skytally.photometry.Luminance;
 import skytally.photometry.Magnitude;
 import skytally.photometry.SurfaceBrightness;
 import skytally.photometry.ZeroPoint;
+import skytally.spectrum.SpectralClasses;
 
 @DisplayName("Natural sky against independent values")
 class NaturalBackgroundReferenceTest {
@@ -126,8 +127,7 @@ class NaturalBackgroundReferenceTest {
     @Test
     void radianceAndLuminanceTellOfTheSameSky() {
         NaturalBackground sky = NaturalBackground.reference(0.2);
-        double perLux =
-                skytally.spectrum.SpectralClasses.naturalSky().spectrum().johnsonVFluxDensityPerLux();
+        double perLux = SpectralClasses.naturalSky().spectrum().johnsonVFluxDensityPerLux();
         assertThat(sky.johnsonVRadianceAt(60) / perLux)
                 .isCloseTo(sky.photopicLuminanceAt(60).candelaPerSquareMetre(), within(1e-16));
     }

@@ -1,6 +1,7 @@
 package skytally.spectrum;
 
 import static org.assertj.core.api.Assertions.assertThat;
+import static org.assertj.core.api.Assertions.assertThatThrownBy;
 import static org.assertj.core.api.Assertions.within;
 
 import java.io.IOException;
@@ -12,6 +13,7 @@ import java.util.stream.Stream;
 import org.junit.jupiter.api.DisplayName;
 import org.junit.jupiter.api.Test;
 import org.junit.jupiter.params.ParameterizedTest;
+import org.junit.jupiter.params.provider.CsvSource;
 import org.junit.jupiter.params.provider.MethodSource;
 
 /** Walks the whole catalogue. */
@@ -58,6 +60,22 @@ class SpectralClassesTest {
     void referencesAreNotOfferedAsLamps() {
         assertThat(SpectralClasses.lamps()).hasSize(25).noneMatch(SpectralClass::isReference);
         assertThat(SpectralClasses.all()).filteredOn(SpectralClass::isReference).hasSize(3);
+    }
+
+    @ParameterizedTest(name = "{0}")
+    @CsvSource(delimiter = '|', textBlock = """
+            LASER,532,,,,1           | a component is LINE, GAUSS or PLANCK, not "LASER"
+            LINE,532,,,1             | six cells are needed, not 5
+            LINE,green,,,,1          | "green" is not a number
+            LINE,1064,,,,1           | Wavelength must be 380 to 780 nm, not 1064.0
+            LINE,532,,,,1.2          | Power must be a share, more than 0 and at most 1, not 1.2
+            LINE,532,,,,NaN          | Power must be a share, more than 0 and at most 1, not NaN
+            GAUSS,532,0,30,,1        | Widths must be more than 0 and less than 1000 nm, not 0.0 and 30.0
+            PLANCK,,,,20,1           | Temperature must be 500 to 100 000 K, not 20.0
+            """)
+    void aBrokenLineSaysWhereAndWhat(String line, String fault) {
+        assertThatThrownBy(() -> SpectralClasses.component(new Table.Row("classes/new.csv", 5, line)))
+                .hasMessage("classes/new.csv, line 5: " + fault);
     }
 
     @Test
