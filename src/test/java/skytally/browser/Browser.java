@@ -18,6 +18,7 @@ import org.openqa.selenium.OutputType;
 import org.openqa.selenium.chrome.ChromeDriver;
 import org.openqa.selenium.chrome.ChromeDriverService;
 import org.openqa.selenium.chrome.ChromeOptions;
+import org.openqa.selenium.print.PageSize;
 import org.openqa.selenium.print.PrintOptions;
 
 /**
@@ -113,23 +114,43 @@ public final class Browser implements AutoCloseable {
 
     /** A picture of the whole page at that width, in the build directory's {@code screenshots}. */
     public Path screenshot(String name, int widthPixels) {
+        width(widthPixels);
+        device(widthPixels, (int) Math.ceil(measure("cssContentSize", "height")));
+        Path file = write(name + ".png", driver.getScreenshotAs(OutputType.BYTES));
+        width(widthPixels);
+        return file;
+    }
+
+    private static Path write(String name, byte[] content) {
         try {
-            width(widthPixels);
-            device(widthPixels, (int) Math.ceil(measure("cssContentSize", "height")));
-            Path file = Files.createDirectories(
-                            Path.of(System.getProperty("skytally.build-directory", "target"), "screenshots"))
-                    .resolve(name + ".png");
-            Files.write(file, driver.getScreenshotAs(OutputType.BYTES));
-            width(widthPixels);
-            return file;
+            Path directory = Path.of(System.getProperty("skytally.build-directory", "target"), "screenshots");
+            return Files.write(Files.createDirectories(directory).resolve(name), content);
         } catch (IOException cannot) {
             throw new UncheckedIOException(cannot);
         }
     }
 
-    /** The page as it is printed, as a PDF. */
-    public byte[] print() {
-        return Base64.getDecoder().decode(driver.print(new PrintOptions()).getContent());
+    /** The papers that pages are printed on. */
+    public enum Paper {
+        /** 210 by 297 mm. */
+        A4(29.7, 21.0),
+        /** 8.5 by 11 inches. */
+        LETTER(27.94, 21.59);
+
+        private final PageSize size;
+
+        Paper(double heightCm, double widthCm) {
+            size = new PageSize(heightCm, widthCm);
+        }
+    }
+
+    /** The page as it is printed, as a PDF, also left beside the pictures. */
+    public byte[] print(String name, Paper paper) {
+        PrintOptions options = new PrintOptions();
+        options.setPageSize(paper.size);
+        byte[] pdf = Base64.getDecoder().decode(driver.print(options).getContent());
+        write(name + ".pdf", pdf);
+        return pdf;
     }
 
     /**

@@ -1,11 +1,18 @@
 package skytally.web;
 
 import static org.assertj.core.api.Assertions.assertThat;
+import static org.assertj.core.api.Assertions.assertThatThrownBy;
 
+import java.io.IOException;
+import java.net.InetAddress;
+import java.net.NetworkInterface;
+import java.net.Socket;
+import java.util.List;
 import org.junit.jupiter.api.DisplayName;
 import org.junit.jupiter.api.Test;
 import org.junit.jupiter.params.ParameterizedTest;
 import org.junit.jupiter.params.provider.ValueSource;
+import org.springframework.beans.factory.annotation.Value;
 import org.springframework.boot.test.web.server.LocalServerPort;
 
 @ServerTest
@@ -14,6 +21,9 @@ class HostPageTest {
 
     @LocalServerPort
     private int port;
+
+    @Value("${server.address}")
+    private String serverAddress;
 
     @ParameterizedTest(name = "{0}")
     @ValueSource(
@@ -97,5 +107,18 @@ class HostPageTest {
     void isTheAddressesOwnWhereTheAddressIsWhole() throws Exception {
         assertThat(Wire.get(port, "http://evil.example/test/plain").send().status())
                 .isEqualTo(400);
+    }
+
+    @Test
+    void leadsHereFromThisComputerOnly() throws Exception {
+        List<InetAddress> others = NetworkInterface.networkInterfaces()
+                .flatMap(NetworkInterface::inetAddresses)
+                .filter(address -> !address.isLoopbackAddress() && !address.isLinkLocalAddress())
+                .toList();
+
+        assertThat(serverAddress).isEqualTo("127.0.0.1");
+        assertThat(others)
+                .allSatisfy(address -> assertThatThrownBy(() -> new Socket(address, port).close())
+                        .isInstanceOf(IOException.class));
     }
 }
