@@ -126,9 +126,8 @@ public final class DataDirectory implements AutoCloseable {
                 written.force(true);
             }
             Files.move(partial, copy, StandardCopyOption.ATOMIC_MOVE);
-            for (Path old : copiesOldestFirst(copies).stream()
-                    .limit(Math.max(0, copiesOldestFirst(copies).size() - COPIES_KEPT))
-                    .toList()) {
+            List<Path> kept = copiesOldestFirst(copies);
+            for (Path old : kept.subList(0, Math.max(0, kept.size() - COPIES_KEPT))) {
                 Files.delete(old);
             }
             return copy;
@@ -170,17 +169,10 @@ public final class DataDirectory implements AutoCloseable {
 
     private static FileChannel locked(Path path) throws IOException {
         Path file = path.resolve(LOCK);
-        if (Files.notExists(file)) {
-            try {
-                Files.createFile(file, ownerOnly(path, OWNER_FILE));
-            } catch (java.nio.file.FileAlreadyExistsException another) {
-                // A copy started in the same moment made it: the lock itself decides between the two.
-                throw inUse(path, another);
-            }
-        }
-        keepToOwner(file, OWNER_FILE);
-        FileChannel channel = FileChannel.open(file, StandardOpenOption.WRITE);
+        FileChannel channel = FileChannel.open(
+                file, Set.of(StandardOpenOption.WRITE, StandardOpenOption.CREATE), ownerOnly(path, OWNER_FILE));
         try {
+            keepToOwner(file, OWNER_FILE);
             FileLock lock = channel.tryLock();
             if (lock != null) {
                 return channel;

@@ -5,6 +5,7 @@ import jakarta.servlet.http.HttpServletRequest;
 import jakarta.servlet.http.HttpServletResponse;
 import java.net.URI;
 import java.security.SecureRandom;
+import java.util.Comparator;
 import java.util.List;
 import java.util.Locale;
 import java.util.Set;
@@ -131,7 +132,7 @@ class ErrorPages implements ErrorController {
     private static double quality(List<MediaType> accepted, MediaType offered) {
         return accepted.stream()
                 .filter(one -> one.includes(offered))
-                .max(java.util.Comparator.comparingInt(ErrorPages::exactness))
+                .max(Comparator.comparingInt(ErrorPages::exactness))
                 .map(MediaType::getQualityValue)
                 .orElse(0.0);
     }

@@ -1,5 +1,6 @@
 package skytally.web;
 
+import jakarta.servlet.http.HttpServletRequest;
 import java.net.URI;
 import java.util.Locale;
 import org.springframework.context.MessageSource;
@@ -21,7 +22,7 @@ class InvalidInputAdvice {
     }
 
     @ExceptionHandler
-    ResponseEntity<ProblemDetail> tell(InvalidInputException invalid, jakarta.servlet.http.HttpServletRequest request) {
+    ResponseEntity<ProblemDetail> tell(InvalidInputException invalid, HttpServletRequest request) {
         ProblemDetail problem = ProblemDetail.forStatusAndDetail(
                 HttpStatus.BAD_REQUEST, messages.getMessage("problem.invalid-input.detail", null, Locale.ENGLISH));
         problem.setTitle(messages.getMessage("problem.invalid-input.title", null, Locale.ENGLISH));

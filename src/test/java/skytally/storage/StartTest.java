@@ -4,21 +4,16 @@ import static org.assertj.core.api.Assertions.assertThat;
 import static org.junit.jupiter.api.Assumptions.assumeTrue;
 
 import java.io.IOException;
-import java.nio.charset.StandardCharsets;
 import java.nio.file.Files;
 import java.nio.file.Path;
 import java.nio.file.attribute.PosixFilePermissions;
 import java.util.ArrayList;
-import java.util.Arrays;
 import java.util.List;
 import java.util.concurrent.TimeUnit;
 import java.util.stream.Stream;
-import org.flywaydb.core.Flyway;
 import org.junit.jupiter.api.DisplayName;
 import org.junit.jupiter.api.Test;
 import org.junit.jupiter.api.io.TempDir;
-import org.junit.jupiter.params.ParameterizedTest;
-import org.junit.jupiter.params.provider.ValueSource;
 import org.springframework.jdbc.core.simple.JdbcClient;
 import org.springframework.jdbc.datasource.DriverManagerDataSource;
 
@@ -92,23 +87,15 @@ class StartTest {
         assertThat(temporary).isDirectoryNotContaining("glob:**skytally*");
     }
 
-    @ParameterizedTest(name = "{0}")
-    @ValueSource(strings = {"every byte wrong", "five bytes", "cut off", "a hole in the middle"})
-    void refusesADamagedDatabaseAndLeavesItAsItIs(String damage) throws Exception {
+    @Test
+    void refusesADamagedDatabaseAndLeavesItAsItIs() throws Exception {
         Path data = temporary.resolve("data");
-        byte[] whole = databaseOf(data, "classpath:db/migration");
-        byte[] damaged = switch (damage) {
-            case "every byte wrong" -> noise(whole, 0, whole.length);
-            case "five bytes" -> "hello".getBytes(StandardCharsets.US_ASCII);
-            case "cut off" -> Arrays.copyOf(whole, 9000);
-            case "a hole in the middle" -> noise(whole, 8192, whole.length);
-            default -> throw new IllegalArgumentException(damage);
-        };
+        byte[] damaged = SampleDatabase.noise(SampleDatabase.in(data, "classpath:db/migration"), 0);
         Path file = data.resolve("skytally.mv.db");
         Files.write(file, damaged);
 
         assertThat(Run.of(data).awaitRefusal())
-                .contains("The database " + file + " is damaged")
+                .contains("The database " + file + " is damaged and cannot be read (code 90030)")
                 .contains("Nothing was changed.")
                 .contains("before-migration");
         assertThat(file).hasBinaryContent(damaged);
@@ -122,7 +109,7 @@ class StartTest {
                 CREATE TABLE later (id INT PRIMARY KEY);
                 INSERT INTO opened_by VALUES ('9.0.0', CURRENT_TIMESTAMP);
                 """);
-        byte[] before = databaseOf(data, "classpath:db/migration", "filesystem:" + newer);
+        byte[] before = SampleDatabase.in(data, "classpath:db/migration", "filesystem:" + newer);
 
         assertThat(Run.of(data).awaitRefusal())
                 .contains("was made by a newer version of Skytally (last opened by 9.0.0)")
@@ -133,7 +120,7 @@ class StartTest {
     @Test
     void copiesTheDatabaseAsideBeforeItChangesIt() throws Exception {
         Path data = temporary.resolve("data");
-        byte[] before = databaseOf(data, "classpath:db/migration");
+        byte[] before = SampleDatabase.in(data, "classpath:db/migration");
         Path later = Files.createDirectory(temporary.resolve("later"));
         Files.writeString(later.resolve("V900__later.sql"), "CREATE TABLE later (id INT PRIMARY KEY);");
 
@@ -154,27 +141,6 @@ class StartTest {
                         .query(Integer.class)
                         .single())
                 .isZero();
-    }
-
-    /** A database as those migrations leave it, closed. */
-    private static byte[] databaseOf(Path data, String... locations) throws IOException {
-        try (DataDirectory directory = DataDirectory.open(data)) {
-            directory.prepareDatabaseFile();
-            Flyway.configure()
-                    .dataSource(directory.databaseUrl(), "sa", "")
-                    .locations(locations)
-                    .load()
-                    .migrate();
-            return Files.readAllBytes(directory.databaseFile());
-        }
-    }
-
-    private static byte[] noise(byte[] whole, int from, int to) {
-        byte[] damaged = whole.clone();
-        for (int i = from; i < to; i++) {
-            damaged[i] = (byte) (i * 31);
-        }
-        return damaged;
     }
 
     private static String permissions(Path path) {
