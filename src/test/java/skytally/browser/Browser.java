@@ -14,12 +14,16 @@ import java.util.List;
 import java.util.Map;
 import java.util.Objects;
 import java.util.stream.Stream;
+import org.openqa.selenium.By;
 import org.openqa.selenium.OutputType;
+import org.openqa.selenium.StaleElementReferenceException;
 import org.openqa.selenium.chrome.ChromeDriver;
 import org.openqa.selenium.chrome.ChromeDriverService;
 import org.openqa.selenium.chrome.ChromeOptions;
 import org.openqa.selenium.print.PageSize;
 import org.openqa.selenium.print.PrintOptions;
+import org.openqa.selenium.support.ui.ExpectedConditions;
+import org.openqa.selenium.support.ui.WebDriverWait;
 
 /**
  * Headless Chromium on the pages of one running server, with a profile of its own that goes when it is closed.
@@ -100,6 +104,18 @@ public final class Browser implements AutoCloseable {
     /** The driver, for everything a person does: finding, typing, pressing keys. */
     public ChromeDriver driver() {
         return driver;
+    }
+
+    /** Waits until something on the page has that text in it: after a press of a key, the next page is on its way. */
+    public void awaitText(By where, String text) {
+        new WebDriverWait(driver, PATIENCE)
+                .ignoring(StaleElementReferenceException.class)
+                .until(ExpectedConditions.textToBePresentInElementLocated(where, text));
+    }
+
+    /** Waits until the address has that in it. */
+    public void awaitAddress(String part) {
+        new WebDriverWait(driver, PATIENCE).until(ExpectedConditions.urlContains(part));
     }
 
     /** Makes the page that many CSS pixels wide. */

@@ -57,6 +57,7 @@ class ErrorsBrowserTest {
         try (Browser browser = Browser.on(port)) {
             browser.open("/test/form");
             browser.driver().findElement(By.linkText("telescope")).click();
+            browser.awaitAddress("theme=telescope");
             browser.open("/there-is-no-such-page");
 
             assertThat(browser.driver().findElement(By.tagName("html")).getDomAttribute("data-theme"))
@@ -72,10 +73,11 @@ class ErrorsBrowserTest {
             browser.driver().manage().deleteAllCookies();
             browser.driver().findElement(By.cssSelector("main button")).click();
 
-            assertThat(browser.driver().findElement(By.tagName("h1")).getText()).isEqualTo("The form had expired");
+            browser.awaitText(By.tagName("h1"), "The form had expired");
             browser.screenshot("form-expired", Browser.WIDE);
             browser.driver().findElement(By.cssSelector("main button")).sendKeys(Keys.ENTER);
 
+            browser.awaitText(By.tagName("body"), "heightM=");
             assertThat(browser.driver().findElement(By.tagName("body")).getText())
                     .contains("heightM=[six \"m\" <b>]", "from=[here]");
         }
@@ -94,7 +96,7 @@ class ErrorsBrowserTest {
             browser.driver().switchTo().activeElement().sendKeys(Keys.TAB);
             assertThat(browser.driver().switchTo().activeElement().getText()).isEqualTo("Skip to the page");
             browser.driver().switchTo().activeElement().sendKeys(Keys.ENTER);
-            assertThat(browser.driver().getCurrentUrl()).endsWith("#main");
+            browser.awaitAddress("#main");
         }
     }
 }
