@@ -35,7 +35,7 @@ import skytally.scene.Scene;
 final class PlaceNumbers {
 
     static final ZeroPoint ZERO_POINT = ZeroPoint.TRADITIONAL;
-    static final VeilingLuminance VEIL = VeilingLuminance.DEFAULT;
+    static final VeilingLuminance VEIL = VeilingLuminance.CieGeneral.DEFAULT;
     /** S/P of sunlight above the air (photometric tables computed for this project). */
     static final double SUN_SCOTOPIC_PHOTOPIC_RATIO = 2.35;
 

@@ -178,10 +178,7 @@ final class KeyLines {
                 .range()
                 .flatMap(with -> figure("zenith/eye/stars-natural")
                         .range()
-                        .map(before -> "About "
-                                + QuantityFormat.significant(with.likely(), 2).plain()
-                                + " stars above the horizon, where nature shows about "
-                                + QuantityFormat.significant(before.likely(), 2).plain() + "."))
+                        .map(before -> starsLost(before.likely(), with.likely())))
                 .orElse("");
         return new KeyLine(
                 "Faintest star overhead, with no lamp in view",
@@ -196,6 +193,16 @@ final class KeyLines {
                         "")),
                 range("zenith/eye/limit", value -> Quantity.magnitude(value, 2)),
                 List.of("To a typical eye; keen eyes see 0.4 fainter, others 0.2 less. " + stars));
+    }
+
+    private static String starsLost(double before, double after) {
+        double lost = before - after;
+        String some = "about " + QuantityFormat.significant(before, 2).plain() + " stars above the horizon";
+        return lost < 0.5
+                ? "None of " + some + " is lost by that."
+                : "Of " + some + ", about "
+                        + QuantityFormat.significant(Math.rint(lost), lost < 10 ? 1 : 2)
+                                .plain() + (lost < 1.5 ? " is" : " are") + " lost.";
     }
 
     private static Quantity percent(double value) {

@@ -60,10 +60,14 @@ record Quantity(Written number, String unit) {
         return new Quantity(QuantityFormat.decimals(value, decimals), "mag/arcsec²");
     }
 
+    /** The unit with the no-break space that belongs before it; none before a degree sign. */
+    public String spacedUnit() {
+        return unit.isEmpty() || unit.startsWith("°") ? unit : "\u00a0" + unit;
+    }
+
     /** All in one piece of text, number and unit kept on one line. */
     String plain() {
-        String gap = unit.isEmpty() || unit.startsWith("°") ? "" : "\u00a0";
-        return number.plain() + gap + unit;
+        return number.plain() + spacedUnit();
     }
 
     @Override
