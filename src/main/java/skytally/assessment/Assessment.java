@@ -13,11 +13,16 @@ import java.util.Optional;
  *
  * @param circumstance when and in what weather it holds
  * @param figures      by key, in the order of working
+ * @param likenesses   of figures of light at the eye, by key; none for a light fainter than the faintest star
  * @param influences   of every guess on every figure
  * @param notes        what limits the results, in sentences
  */
 public record Assessment(
-        Circumstance circumstance, Map<String, Figure> figures, List<Influence> influences, List<Note> notes) {
+        Circumstance circumstance,
+        Map<String, Figure> figures,
+        Map<String, Likeness> likenesses,
+        List<Influence> influences,
+        List<Note> notes) {
 
     /** What a note is about. */
     public enum Topic {
@@ -43,6 +48,7 @@ public record Assessment(
 
     public Assessment {
         figures = Collections.unmodifiableMap(new LinkedHashMap<>(figures));
+        likenesses = Map.copyOf(likenesses);
         influences = List.copyOf(influences);
         notes = List.copyOf(notes);
     }
@@ -60,6 +66,11 @@ public record Assessment(
             throw new IllegalArgumentException("No figure has the key " + key);
         }
         return figure;
+    }
+
+    /** The natural light a figure is like, if it is light at the eye and can be seen at all. */
+    public Optional<Likeness> likeness(Figure figure) {
+        return Optional.ofNullable(likenesses.get(figure.key()));
     }
 
     static String key(String place, String measure, Circumstance circumstance) {

@@ -63,7 +63,19 @@ public final class Assessor {
                 Figure figure = figure(slot, influences);
                 figures.put(figure.key(), figure);
             }
-            return new Assessment(circumstance, figures, influences, new Notes(likely).all());
+            List<Assessment.Note> notes = new Notes(likely).all();
+            return new Assessment(circumstance, figures, likenesses(), influences, notes);
+        }
+
+        private Map<String, Likeness> likenesses() {
+            Map<String, Likeness> likenesses = new HashMap<>();
+            for (PlaceNumbers place : likely) {
+                for (Measure measure : List.of(Measure.ONE_ILLUMINANCE, Measure.ILLUMINANCE)) {
+                    String key = Assessment.key(place.observer().mark(), measure.path(), circumstance);
+                    place.likeness(place.get(measure)).ifPresent(likeness -> likenesses.put(key, likeness));
+                }
+            }
+            return likenesses;
         }
 
         private List<Slot> slots() {

@@ -4,14 +4,12 @@ import java.util.ArrayList;
 import java.util.List;
 import skytally.assessment.Assessment.Note;
 import skytally.assessment.Assessment.Topic;
-import skytally.eye.NaturalAnchors;
 import skytally.notation.QuantityFormat;
 
 /** What limits the results of a scene, in sentences. */
 final class Notes {
 
     private static final double POINT_ARCMIN = 1;
-    private static final double PATCH_ARCMIN = 5;
     private static final double GROUND_IS_A_POINT_M = 300;
     private static final double FAR_SKY_M = 10_000;
     private static final double RODS_FROM_MAG = 4;
@@ -71,7 +69,7 @@ final class Notes {
         if (!(one > 0)) {
             return;
         }
-        if (size >= PATCH_ARCMIN) {
+        if (size >= PlaceNumbers.WIDEST_STAR_ARCMIN) {
             add(
                     Topic.NOT_A_POINT,
                     "One lamp's bright part is " + arcminutes
@@ -82,11 +80,7 @@ final class Notes {
                     "One lamp's bright part is " + arcminutes
                             + " wide: a small patch, with the magnitude of its total light.");
         }
-        double moon = NaturalAnchors.byId("full-moon")
-                .orElseThrow()
-                .illuminance(PlaceNumbers.ZERO_POINT)
-                .lux();
-        if (one >= moon) {
+        if (one >= PlaceNumbers.fullMoonLx()) {
             add(
                     Topic.BRIGHTER_THAN_MOON,
                     "One lamp gives more light than the full Moon, so no star is compared with it.");

@@ -3,11 +3,15 @@ package skytally.assessment;
 import java.util.Arrays;
 import java.util.List;
 import java.util.Objects;
+import java.util.Optional;
 import org.jspecify.annotations.Nullable;
 import skytally.atmosphere.Atmosphere;
 import skytally.atmosphere.DirectPath;
+import skytally.eye.Comparison;
 import skytally.eye.EquivalentStar;
 import skytally.eye.LimitingMagnitude;
+import skytally.eye.NaturalAnchor;
+import skytally.eye.NaturalAnchors;
 import skytally.eye.PointVisibility;
 import skytally.eye.StarCount;
 import skytally.geometry.Direction;
@@ -38,6 +42,9 @@ final class PlaceNumbers {
     static final VeilingLuminance VEIL = VeilingLuminance.CieGeneral.DEFAULT;
     /** S/P of sunlight above the air (photometric tables computed for this project). */
     static final double SUN_SCOTOPIC_PHOTOPIC_RATIO = 2.35;
+
+    /** Wider than this a bright part is no point and no star is compared with it. */
+    static final double WIDEST_STAR_ARCMIN = 5;
 
     private final Scene scene;
     private final Observer observer;
@@ -247,6 +254,34 @@ final class PlaceNumbers {
     /** Light of the brightest single lamp with nothing taken by the air, in lux. */
     double oneInVacuumLx() {
         return vacuumLx;
+    }
+
+    /**
+     * Whether one lamp may be compared with a star: its bright part under 5 arcminutes, its light less than the full
+     * Moon's.
+     */
+    boolean isLikeAStar() {
+        return get(Measure.ANGULAR_SIZE) < WIDEST_STAR_ARCMIN && get(Measure.ONE_ILLUMINANCE) < fullMoonLx();
+    }
+
+    /** What a light at the eye is like; nothing for one too faint to be seen. */
+    Optional<Likeness> likeness(double lux) {
+        if (!(lux > 0)) {
+            return Optional.empty();
+        }
+        if (!isLikeAStar()) {
+            return Optional.of(new Likeness(fullMoon().said(), lux / fullMoonLx(), true));
+        }
+        return Comparison.of(new Illuminance(lux), ZERO_POINT)
+                .map(found -> new Likeness(found.anchor().said(), found.times(), false));
+    }
+
+    private static NaturalAnchor fullMoon() {
+        return NaturalAnchors.byId("full-moon").orElseThrow();
+    }
+
+    static double fullMoonLx() {
+        return fullMoon().illuminance(ZERO_POINT).lux();
     }
 
     private static double arcminutes(double sizeM, double distanceM) {

@@ -2,8 +2,14 @@ package skytally.charts;
 
 import java.util.ArrayList;
 import java.util.Comparator;
+import java.util.HashMap;
 import java.util.List;
+import java.util.Map;
 import org.jspecify.annotations.Nullable;
+import skytally.citation.Citation;
+import skytally.eye.NaturalAnchor;
+import skytally.eye.NaturalAnchors;
+import skytally.notation.QuantityFormat;
 import skytally.notation.Written;
 import skytally.photometry.Illuminance;
 import skytally.photometry.ZeroPoint;
@@ -36,11 +42,27 @@ public final class Ladder {
      *
      * @param name     as printed
      * @param lux      at the eye or on the ground, more than 0
-     * @param written  the same written out, with its unit
      * @param onGround whether it is light on level ground rather than a point
-     * @param letter   that leads to its source
+     * @param letter   that leads to its source; the same source has the same letter
+     * @param source   where its value comes from
      */
-    public record Rung(String name, double lux, Written written, boolean onGround, String letter) {}
+    public record Rung(String name, double lux, boolean onGround, String letter, Citation source) {}
+
+    /** The rungs nature gives, brightest first. */
+    public static List<Rung> naturalRungs(ZeroPoint zeroPoint) {
+        Map<Citation, String> letters = new HashMap<>();
+        return NaturalAnchors.all().stream()
+                .sorted(Comparator.comparing((NaturalAnchor anchor) -> anchor.illuminance(zeroPoint))
+                        .reversed())
+                .map(anchor -> new Rung(
+                        anchor.name(),
+                        anchor.illuminance(zeroPoint).lux(),
+                        anchor.kind() == NaturalAnchor.Kind.GROUND,
+                        letters.computeIfAbsent(
+                                anchor.citation(), source -> Character.toString((char) ('a' + letters.size()))),
+                        anchor.citation()))
+                .toList();
+    }
 
     /**
      * A light of the proposal.
@@ -324,7 +346,8 @@ public final class Ladder {
             svg.text("tspan", rung.letter(), "font-size", 11, "dy", -5, "dx", 2).close("text");
             line(
                     svg,
-                    new Line(rung.written(), rung.onGround() ? " lx on level ground" : " lx"),
+                    new Line(
+                            QuantityFormat.significant(rung.lux(), 2), rung.onGround() ? " lx on level ground" : " lx"),
                     label.wanted() + 20,
                     "app-text--soft",
                     13);

@@ -83,7 +83,7 @@ final class GuessRows {
             case AIR -> Clearness.byId(value).orElseThrow().words();
             default ->
                 blank.isLength() && units == Units.US
-                        ? SentenceAddress.feet(value)
+                        ? SentenceAddress.feetToRead(value)
                         : QuantityFormat.asTyped(new BigDecimal(value)).digits();
         };
     }

@@ -7,15 +7,12 @@ import java.util.function.DoubleFunction;
 import org.jspecify.annotations.Nullable;
 import skytally.assessment.Assessment.Topic;
 import skytally.assessment.Figure;
+import skytally.assessment.Likeness;
 import skytally.assessment.Range;
-import skytally.eye.Comparison;
-import skytally.eye.NaturalAnchors;
 import skytally.firstlook.FirstLookPage.KeyLine;
 import skytally.firstlook.FirstLookPage.RangeText;
 import skytally.notation.QuantityFormat;
 import skytally.notation.Written;
-import skytally.photometry.Illuminance;
-import skytally.photometry.ZeroPoint;
 import skytally.web.Switches.Units;
 
 /** The answers of the first look, each a number with what it means. */
@@ -46,7 +43,7 @@ final class KeyLines {
     private KeyLine oneLamp() {
         String what = count > 1 ? "Light at your eye from one lamp, the brightest" : "Light at your eye";
         List<String> says = new ArrayList<>();
-        says.add(comparison(likely("direct/one-lamp-illuminance")));
+        says.add(comparison("direct/one-lamp-illuminance"));
         if (count == 1) {
             says.add(onWindow());
         }
@@ -56,10 +53,7 @@ final class KeyLines {
     private KeyLine together() {
         String what = "All " + written(count) + " together, if they stood at one point";
         return light(
-                what,
-                "direct/illuminance",
-                "direct/magnitude",
-                List.of(comparison(likely("direct/illuminance")), onWindow()));
+                what, "direct/illuminance", "direct/magnitude", List.of(comparison("direct/illuminance"), onWindow()));
     }
 
     private KeyLine light(String what, String measure, String magnitude, List<String> says) {
@@ -93,24 +87,22 @@ final class KeyLines {
     }
 
     /** In stars and planets where the lamp is a point fainter than the Moon; else in full Moons, and why. */
-    private String comparison(double lux) {
-        if (lux == 0) {
+    private String comparison(String measure) {
+        Figure figure = figure(measure);
+        if (figure.likely() == 0) {
             return "Light still arrives from the ground and the sky.";
         }
-        if (!isComparedWithStars()) {
-            double moons = lux
-                    / NaturalAnchors.byId("full-moon")
-                            .orElseThrow()
-                            .illuminance(ZeroPoint.TRADITIONAL)
-                            .lux();
-            return "That is " + times(moons) + " the full Moon 30° up; no star is compared, as noted below.";
+        Optional<Likeness> found = answer.assessment().likeness(figure);
+        if (found.isEmpty()) {
+            return "Fainter than the faintest star under a natural sky.";
         }
-        Optional<Comparison> found = Comparison.of(new Illuminance(lux), ZeroPoint.TRADITIONAL);
-        return found.map(beside -> beside.times() < 1.15
-                        ? "About as much as " + beside.anchor().said() + "."
-                        : "About " + times(beside.times()) + " "
-                                + beside.anchor().said() + ".")
-                .orElse("Fainter than the faintest star under a natural sky.");
+        Likeness like = found.get();
+        if (like.inMoons()) {
+            return "That is " + times(like.times()) + " " + like.natural() + "; no star is compared, as noted below.";
+        }
+        return like.times() < 1.15
+                ? "About as much as " + like.natural() + "."
+                : "About " + times(like.times()) + " " + like.natural() + ".";
     }
 
     private String onWindow() {

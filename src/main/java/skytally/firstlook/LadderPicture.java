@@ -2,13 +2,10 @@ package skytally.firstlook;
 
 import java.util.ArrayList;
 import java.util.Comparator;
-import java.util.LinkedHashMap;
+import java.util.LinkedHashSet;
 import java.util.List;
-import java.util.Map;
+import java.util.Set;
 import skytally.charts.Ladder;
-import skytally.citation.Citation;
-import skytally.eye.NaturalAnchor;
-import skytally.eye.NaturalAnchors;
 import skytally.notation.QuantityFormat;
 import skytally.photometry.Illuminance;
 import skytally.photometry.ZeroPoint;
@@ -40,17 +37,16 @@ record LadderPicture(String svg, String says, List<Row> rows, List<Source> sourc
     private static final ZeroPoint ZERO_POINT = ZeroPoint.TRADITIONAL;
 
     static LadderPicture of(Answer answer, Units units) {
-        Map<Citation, String> letters = new LinkedHashMap<>();
+        List<Ladder.Rung> rungs = Ladder.naturalRungs(ZERO_POINT);
         List<Row> rows = new ArrayList<>();
-        List<Ladder.Rung> rungs = new ArrayList<>();
-        for (NaturalAnchor anchor : brightestFirst()) {
-            String letter = letters.computeIfAbsent(
-                    anchor.citation(), citation -> Character.toString((char) ('a' + letters.size())));
-            double lux = anchor.illuminance(ZERO_POINT).lux();
-            boolean onGround = anchor.kind() == NaturalAnchor.Kind.GROUND;
-            rungs.add(new Ladder.Rung(anchor.name(), lux, QuantityFormat.significant(lux, 2), onGround, letter));
-            String name = anchor.name() + (onGround ? ", on level ground" : "");
-            rows.add(row(name, lux, units, letter, false));
+        Set<Source> sources = new LinkedHashSet<>();
+        for (Ladder.Rung rung : rungs) {
+            String name = rung.name() + (rung.onGround() ? ", on level ground" : "");
+            rows.add(row(name, rung.lux(), units, rung.letter(), false));
+            sources.add(new Source(
+                    rung.letter(),
+                    rung.source().reference(),
+                    rung.source().standing().words()));
         }
         List<Ladder.Mark> marks = marks(answer);
         for (Ladder.Mark mark : marks) {
@@ -58,20 +54,8 @@ record LadderPicture(String svg, String says, List<Row> rows, List<Source> sourc
         }
         rows.sort(Comparator.comparingDouble(Row::lux).reversed());
         String says = says(answer, rows, units);
-        List<Source> sources = letters.entrySet().stream()
-                .map(each -> new Source(
-                        each.getValue(),
-                        each.getKey().reference(),
-                        each.getKey().standing().words()))
-                .toList();
-        return new LadderPicture(new Ladder("ladder", says, rungs, marks, ZERO_POINT).svg(), says, rows, sources);
-    }
-
-    private static List<NaturalAnchor> brightestFirst() {
-        return NaturalAnchors.all().stream()
-                .sorted(Comparator.comparing((NaturalAnchor anchor) -> anchor.illuminance(ZERO_POINT))
-                        .reversed())
-                .toList();
+        return new LadderPicture(
+                new Ladder("ladder", says, rungs, marks, ZERO_POINT).svg(), says, rows, List.copyOf(sources));
     }
 
     private static List<Ladder.Mark> marks(Answer answer) {

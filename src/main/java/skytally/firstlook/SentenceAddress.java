@@ -28,7 +28,8 @@ final class SentenceAddress {
 
     private static final List<String> SWITCHES = List.of("units", "theme");
     private static final BigDecimal METRES_PER_FOOT = new BigDecimal("0.3048");
-    private static final MathContext SHOWN_FEET = new MathContext(7);
+    /** Enough that a length typed in feet comes back as it was typed. */
+    private static final MathContext SHOWN_FEET = new MathContext(5);
 
     private SentenceAddress() {}
 
@@ -44,6 +45,11 @@ final class SentenceAddress {
     /** A length in metres as the feet to show in its field. */
     static String feet(String metres) {
         return plain(new BigDecimal(metres).divide(METRES_PER_FOOT, SHOWN_FEET));
+    }
+
+    /** The same where it is read and not typed: three figures. */
+    static String feetToRead(String metres) {
+        return plain(new BigDecimal(metres).divide(METRES_PER_FOOT, new MathContext(3)));
     }
 
     static String plainAddress(MultiValueMap<String, String> sent) {

@@ -88,7 +88,7 @@ record SentenceForm(
                 .orElse(Guesses.of(blank).likely());
         if (blank.kind() != Blank.Kind.CHOICE) {
             value = shown(value, blank, inFeet, fault != null);
-            guess = inFeet ? SentenceAddress.feet(guess) : guess;
+            guess = inFeet ? SentenceAddress.feetToRead(guess) : guess;
         }
         String unit = inFeet ? "feet" : unitInWords(blank);
         return new Field(

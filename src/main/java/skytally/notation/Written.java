@@ -21,12 +21,12 @@ public record Written(String digits, int power) {
         return power < 0 ? "−" + (-power) : Integer.toString(power);
     }
 
-    /** All in one line of text, such as {@code 1.4 × 10⁻⁵}. */
+    /** All in one line of text, such as {@code 1.4 × 10⁻⁵}, that no line break divides. */
     public String plain() {
         if (!hasPower()) {
             return digits;
         }
-        StringBuilder text = new StringBuilder(digits).append(" × 10");
+        StringBuilder text = new StringBuilder(digits).append("\u00a0×\u00a010");
         if (power < 0) {
             text.append('⁻');
         }
