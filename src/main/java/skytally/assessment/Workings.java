@@ -246,6 +246,10 @@ final class Workings {
 
     private Working star(String name, Measure from, Measure to) {
         double own = numbers.air().extinctionMagPerAirMass();
+        double without = numbers.get(from);
+        String withOwnAir = "This air's own k_V is " + decimals(own, 3) + ": with it the star is "
+                + decimals(without - own, 2) + " overhead and "
+                + decimals(without - own * AirMass.atAltitude(30), 2) + " at 30° altitude.";
         return new Working(
                 "m_cat = " + name + " − k_V X",
                 "m_cat = " + result(from) + " − 0.20 × 1 = " + result(to),
@@ -254,12 +258,7 @@ final class Workings {
                         constant("Extinction by the overhead convention", "k_V", "0.20 mag"),
                         constant("Air mass overhead", "X", "1")),
                 cite("overhead-star", "kasten-young-1989"),
-                List.of("This air's own k_V is "
-                        + QuantityFormat.decimals(own, 3).plain() + ": with it the star is "
-                        + QuantityFormat.decimals(numbers.get(from) - own, 2).plain() + " overhead and "
-                        + QuantityFormat.decimals(numbers.get(from) - own * AirMass.atAltitude(30), 2)
-                                .plain()
-                        + " at 30° altitude."));
+                List.of(withOwnAir));
     }
 
     private Working standardMagnitude() {
@@ -543,9 +542,8 @@ final class Workings {
                 List.of(
                         "At the eye, the sky alone, no lamp in view. Keen eyes see 0.39 mag more, ordinary ones 0.20 mag less.",
                         "In a star catalogue the limit overhead is "
-                                + QuantityFormat.decimals(toAir, 2).plain() + ", since the air takes "
-                                + QuantityFormat.decimals(numbers.air().extinctionMagPerAirMass(), 2)
-                                        .plain()
+                                + decimals(toAir, 2) + ", since the air takes "
+                                + decimals(numbers.air().extinctionMagPerAirMass(), 2)
                                 + "."));
     }
 
@@ -627,11 +625,16 @@ final class Workings {
             return "none";
         }
         Unit unit = measure.unit();
-        String digits = unit.isLinear()
-                ? QuantityFormat.significant(value, FIGURES).plain()
-                : QuantityFormat.decimals(value, 4).plain();
+        String digits =
+                unit.isLinear() ? QuantityFormat.significant(value, FIGURES).plain() : decimals(value, 4);
         String gap = unit == Unit.DEGREE ? "" : "\u00a0";
         return digits + gap + unit.symbol();
+    }
+
+    private static String decimals(double value, int decimals) {
+        return Double.isNaN(value)
+                ? "none"
+                : QuantityFormat.decimals(value, decimals).plain();
     }
 
     private static String written(double value, String unit) {

@@ -22,6 +22,8 @@ public record DirectPath(
     /** Radius of the Earth enlarged for mean refraction, in metres. */
     public static final double EFFECTIVE_EARTH_RADIUS_M = Atmosphere.EARTH_RADIUS_M * 7 / 6;
 
+    private static final double LOWEST_M = 0.01;
+
     /**
      * @param lampHeightM     of the lamp above the ground, 0 or more
      * @param eyeHeightM      of the eye above the ground, 0 or more
@@ -42,10 +44,13 @@ public record DirectPath(
         return new DirectPath(length, arcsine(sineAtEye), arcsine(sineAtLamp), lampHeightM, clears);
     }
 
-    /** How far along the ground the horizon lies from a height, in metres. */
+    /**
+     * How far along the ground the horizon lies from a height, in metres. Nothing that shines or looks lies lower than
+     * a centimetre, so two things on the ground side by side see each other.
+     */
     public static double horizonDistanceM(double heightM) {
         double radius = EFFECTIVE_EARTH_RADIUS_M;
-        double h = Math.max(0, heightM);
+        double h = Math.max(LOWEST_M, heightM);
         return radius * StrictMath.atan(Math.sqrt(h * (2 * radius + h)) / radius);
     }
 

@@ -7,11 +7,11 @@ import org.springframework.context.MessageSource;
 import org.springframework.http.HttpHeaders;
 import org.springframework.http.HttpStatus;
 import org.springframework.http.MediaType;
-import org.springframework.http.ResponseEntity;
 import org.springframework.stereotype.Controller;
 import org.springframework.util.MultiValueMap;
 import org.springframework.web.bind.annotation.GetMapping;
 import org.springframework.web.bind.annotation.RequestParam;
+import org.springframework.web.bind.annotation.ResponseBody;
 import org.springframework.web.servlet.ModelAndView;
 import org.springframework.web.servlet.view.RedirectView;
 import skytally.web.InvalidInputException;
@@ -52,13 +52,13 @@ class FirstLookController {
     }
 
     @GetMapping(path = "/", produces = MediaType.APPLICATION_JSON_VALUE)
-    ResponseEntity<FirstLookJson> data(@RequestParam MultiValueMap<String, String> sent) {
+    @ResponseBody
+    FirstLookJson data(@RequestParam MultiValueMap<String, String> sent, HttpServletResponse response) {
+        response.addHeader(HttpHeaders.VARY, HttpHeaders.ACCEPT);
         SentenceReader.Result read = SentenceReader.read(sent);
         Sentence sentence = read.sentence().orElseThrow(() -> new InvalidInputException(faults(read)));
         String caution = messages.getMessage("caution", null, Locale.ENGLISH);
-        return ResponseEntity.ok()
-                .header(HttpHeaders.VARY, HttpHeaders.ACCEPT)
-                .body(FirstLookJson.of(answers.to(sentence), caution));
+        return FirstLookJson.of(answers.to(sentence), caution);
     }
 
     private static List<InvalidInputException.Fault> faults(SentenceReader.Result read) {

@@ -85,7 +85,7 @@ record FirstLookJson(
 
     private static Glare glare(Answer answer) {
         return new Glare(
-                likely(answer, "beside/glare/angle"),
+                answer.sentence().glareAngleDeg(),
                 likely(answer, "beside/glare/veil"),
                 orNull(answer, "beside/glare/veil-brightness"),
                 likely(answer, "beside/glare/natural-skies"),

@@ -72,7 +72,9 @@ final class GuessRows {
                 words(blank, guess.low()),
                 words(blank, guess.likely()),
                 words(blank, guess.high()),
-                move(guess).map(GuessRows::inWords).orElse("not moved: an example or a choice"),
+                move(guess)
+                        .map(GuessRows::inWords)
+                        .orElse(guess.hasRange() ? "nothing here" : "no range: an example or a choice"),
                 guess.why());
     }
 

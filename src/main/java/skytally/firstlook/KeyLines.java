@@ -18,6 +18,8 @@ import skytally.web.Switches.Units;
 /** The answers of the first look, each a number with what it means. */
 final class KeyLines {
 
+    private static final double LEAST_PERCENT = 0.01;
+
     private final Answer answer;
     private final Units units;
     private final int count;
@@ -197,7 +199,11 @@ final class KeyLines {
                                 .plain() + (lost < 1.5 ? " is" : " are") + " lost.";
     }
 
+    /** Below a hundredth of a percent the digits say nothing. */
     private static Quantity percent(double value) {
+        if (value > 0 && value < LEAST_PERCENT) {
+            return new Quantity(new Written("under 0.01", 0), "%");
+        }
         Written written = QuantityFormat.significant(value, 2);
         return new Quantity(new Written((value > 0 ? "+" : "") + written.digits(), written.power()), "%");
     }
