@@ -41,14 +41,28 @@ public final class SceneDrawing {
     private static final double LOW_SKY_RAD = Math.toRadians(30);
 
     private final Project project;
+    private final Period period;
     private final double baseM;
     private final List<Lamp> lamps = new ArrayList<>();
     private final List<String> leftOut = new ArrayList<>();
     private final List<String> unplaced = new ArrayList<>();
     private final Map<String, Map<Property, Known>> known = new HashMap<>();
 
-    private SceneDrawing(Project project, Scheme scheme) {
+    /** Before the curfew or after it: which of a type's outputs counts. */
+    public enum Period {
+        EARLY("earlyOutput"),
+        LATE("lateOutput");
+
+        private final String outputField;
+
+        Period(String outputField) {
+            this.outputField = outputField;
+        }
+    }
+
+    private SceneDrawing(Project project, Scheme scheme, Period period) {
         this.project = project;
+        this.period = period;
         this.baseM = lowestGroundM(project, scheme);
         draw(scheme, false);
         if (scheme.kind() != Scheme.Kind.EXISTING) {
@@ -59,7 +73,7 @@ public final class SceneDrawing {
     }
 
     /**
-     * The scene of one scheme.
+     * What was drawn.
      *
      * @param scene    to be assessed; without ranges
      * @param leftOut  marks of types that could not be reckoned with, so that sums are "at least"
@@ -67,8 +81,9 @@ public final class SceneDrawing {
      */
     public record Drawn(OpenScene scene, List<String> leftOut, List<String> unplaced) {}
 
-    public static Drawn of(Project project, Scheme scheme) {
-        SceneDrawing drawing = new SceneDrawing(project, scheme);
+    /** The scene of one scheme in one period of the night. */
+    public static Drawn of(Project project, Scheme scheme, Period period) {
+        SceneDrawing drawing = new SceneDrawing(project, scheme, period);
         Scene scene = new Scene(drawing.lamps, drawing.observers(), drawing.surroundings());
         return new Drawn(drawing.open(scene), List.copyOf(drawing.leftOut), List.copyOf(drawing.unplaced));
     }
@@ -237,7 +252,8 @@ public final class SceneDrawing {
                     count,
                     at,
                     attitude,
-                    new LuminousFlux(lumens.number()),
+                    new LuminousFlux(
+                            lumens.number() * required(period.outputField).number() / 100),
                     shape.distribution(),
                     SpectralClasses.byId(spectralClass.text()).orElseThrow().spectrum(),
                     size,
