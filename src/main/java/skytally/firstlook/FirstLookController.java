@@ -40,7 +40,7 @@ class FirstLookController {
             plain.setExpandUriTemplateVariables(false);
             return new ModelAndView(plain);
         }
-        SentenceReader.Result read = SentenceReader.read(sent);
+        SentenceReader.Result read = SentenceReader.read(sent, switches.units());
         ModelAndView page = new ModelAndView("firstlook/page");
         page.addObject("form", SentenceForm.of(sent, read, switches.units()));
         read.sentence()

@@ -18,6 +18,7 @@ import skytally.notation.NumberReader;
 import skytally.notation.QuantityFormat;
 import skytally.spectrum.SpectralClass;
 import skytally.spectrum.SpectralClasses;
+import skytally.web.Switches.Units;
 
 /** Reads the sentence from what was typed, and finds everything wrong with it at once. */
 final class SentenceReader {
@@ -43,14 +44,25 @@ final class SentenceReader {
     private final Map<Blank, String> texts = new EnumMap<>(Blank.class);
     private final Set<Blank> guessed = EnumSet.noneOf(Blank.class);
     private final List<Fault> faults = new ArrayList<>();
+    private final Units units;
 
-    private SentenceReader() {}
+    private SentenceReader(Units units) {
+        this.units = units;
+    }
 
     /**
-     * @param typed by field name; a blank that is not among them is guessed
+     * @param typed by field name, lengths in metres; a blank that is not among them is guessed
      */
     static Result read(Map<String, ? extends List<@Nullable String>> typed) {
-        SentenceReader reader = new SentenceReader();
+        return read(typed, Units.METRIC);
+    }
+
+    /**
+     * @param typed by field name, lengths in metres; a blank that is not among them is guessed
+     * @param units that what is wrong is told in
+     */
+    static Result read(Map<String, ? extends List<@Nullable String>> typed, Units units) {
+        SentenceReader reader = new SentenceReader(units);
         for (Blank blank : Blank.values()) {
             reader.read(blank, typed.get(blank.field()));
         }
@@ -122,21 +134,34 @@ final class SentenceReader {
         faults.add(new Fault(blank, blank.label() + separator + rest));
     }
 
-    private static String what(Blank blank) {
+    private String what(Blank blank) {
+        String example = isInFeet(blank) ? SentenceAddress.feetToRead(blank.example()) : blank.example();
         return switch (blank.kind()) {
-            case WHOLE -> "a whole number " + bounds(blank) + ", such as " + blank.example();
-            case NUMBER -> "a number " + bounds(blank) + ", such as " + blank.example();
+            case WHOLE -> "a whole number " + bounds(blank) + ", such as " + example;
+            case NUMBER -> "a number " + bounds(blank) + ", such as " + example;
             case CHOICE -> "one of: " + String.join(", ", choices(blank));
         };
     }
 
-    private static String bounds(Blank blank) {
+    private boolean isInFeet(Blank blank) {
+        return blank.isLength() && units == Units.US;
+    }
+
+    private String bounds(Blank blank) {
+        if (isInFeet(blank)) {
+            return "from " + QuantityFormat.asTyped(SentenceAddress.feetFrom(blank.least())) + " to "
+                    + QuantityFormat.asTyped(SentenceAddress.feetTo(blank.most())) + "\u00a0ft";
+        }
         String unit = blank.unit().isEmpty() || blank.unit().equals("°") ? blank.unit() : "\u00a0" + blank.unit();
         return "from " + QuantityFormat.asTyped(blank.least()) + " to " + QuantityFormat.asTyped(blank.most()) + unit;
     }
 
     private static String quoted(String text) {
-        return text.length() <= QUOTED ? text : text.substring(0, QUOTED) + "…";
+        if (text.length() <= QUOTED) {
+            return text;
+        }
+        boolean cutsACharacter = Character.isHighSurrogate(text.charAt(QUOTED - 1));
+        return text.substring(0, cutsACharacter ? QUOTED - 1 : QUOTED) + "…";
     }
 
     /** The ids a blank may hold. */
