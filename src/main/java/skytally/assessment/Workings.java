@@ -15,6 +15,7 @@ import skytally.scene.Known;
 import skytally.scene.Lamp;
 import skytally.scene.OpenScene;
 import skytally.scene.Property;
+import skytally.spectrum.SpectralClasses;
 
 /**
  * Shows how each number of a place was worked out: the formula, the same with the numbers in it, what went in and how
@@ -369,7 +370,9 @@ final class Workings {
                 List.of(
                         "CIE General form, 0.1 to 100 degrees, printed to " + (int) VeilingLuminance.WIDEST_PRINTED_DEG
                                 + ". Forms differ by 10 to 40 %; at 70 years the veil is about twice as strong.",
-                        "It is inside the eye: a hand that shades the lamp removes it, and it is no part of the sky."));
+                        "It is inside the eye: a hand that shades the lamp removes it, and it is no part of the sky.",
+                        "An estimate for what is looked at directly. A lamp in view also lowers the eye's sensitivity for"
+                                + " minutes, which is not in it. Nothing is said of telescopes."));
     }
 
     private Working veilBrightness(int look) {
@@ -396,7 +399,22 @@ final class Workings {
                         zeroPointLuminance()),
                 cite("falchi-2016", "allen-zero-point"),
                 List.of(
-                        "In natural skies of 22.0 mag/arcsec². Near the horizon the natural sky is 1.6 to 1.8 times as bright."));
+                        "In natural skies of 22.0 mag/arcsec². Near the horizon the natural sky is 1.6 to 1.8 times as bright.",
+                        "By day vision. The dark-adapted eye weighs by V′(λ): to it the veil is "
+                                + written(darkAdaptedSkies(look), "") + " natural skies, by the S/P of the lamp, "
+                                + written(lamp.spectrum().scotopicPhotopicRatio(), "")
+                                + ", over that of the natural sky, "
+                                + written(naturalScotopicRatio(), "") + "."));
+    }
+
+    private double darkAdaptedSkies(int look) {
+        return numbers.get(Measure.VEIL_NATURAL_SKIES, look)
+                * lamp.spectrum().scotopicPhotopicRatio()
+                / naturalScotopicRatio();
+    }
+
+    private static double naturalScotopicRatio() {
+        return SpectralClasses.naturalSky().spectrum().scotopicPhotopicRatio();
     }
 
     private Working veilReach(int look) {

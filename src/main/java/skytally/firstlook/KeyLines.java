@@ -45,7 +45,7 @@ final class KeyLines {
     private KeyLine oneLamp() {
         String what = count > 1 ? "Light at your eye from one lamp, the brightest" : "Light at your eye";
         List<String> says = new ArrayList<>();
-        says.add(comparison("direct/one-lamp-illuminance"));
+        says.add(comparison("direct/one-lamp-illuminance", "direct/one-lamp-star-overhead"));
         if (count == 1) {
             says.add(onWindow());
         }
@@ -55,7 +55,10 @@ final class KeyLines {
     private KeyLine together() {
         String what = "All " + written(count) + " together, if they stood at one point";
         return light(
-                what, "direct/illuminance", "direct/magnitude", List.of(comparison("direct/illuminance"), onWindow()));
+                what,
+                "direct/illuminance",
+                "direct/magnitude",
+                List.of(comparison("direct/illuminance", "direct/star-overhead"), onWindow()));
     }
 
     private KeyLine light(String what, String measure, String magnitude, List<String> says) {
@@ -89,7 +92,7 @@ final class KeyLines {
     }
 
     /** In stars and planets where the lamp is a point fainter than the Moon; else in full Moons, and why. */
-    private String comparison(String measure) {
+    private String comparison(String measure, String star) {
         Figure figure = figure(measure);
         if (figure.likely() == 0) {
             return "Light still arrives from the ground and the sky.";
@@ -102,9 +105,11 @@ final class KeyLines {
         if (like.inMoons()) {
             return "That is " + times(like.times()) + " " + like.natural() + "; no star is compared, as noted below.";
         }
-        return like.times() < 1.15
-                ? "About as much as " + like.natural() + "."
-                : "About " + times(like.times()) + " " + like.natural() + ".";
+        String besides = like.times() < 1.15
+                ? "About as much as " + like.natural()
+                : "About " + times(like.times()) + " " + like.natural();
+        return besides + "; equal to a star of magnitude "
+                + QuantityFormat.decimals(likely(star), 1).digits() + " overhead.";
     }
 
     private String onWindow() {
