@@ -246,6 +246,7 @@ final class KeyLines {
                     Quantity high = written.apply(range.high());
                     return new RangeText(low.number(), high.number(), high.unit());
                 })
+                .filter(range -> !range.low().equals(range.high()))
                 .orElse(null);
     }
 }
