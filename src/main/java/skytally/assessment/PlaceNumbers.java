@@ -63,7 +63,7 @@ final class PlaceNumbers {
         Atmosphere air = air();
         DirectLight.Sum sum = new DirectLight.Sum();
         DirectLight direct = new DirectLight(scene.lamps(), air);
-        direct.at(observer.eye(), observer.facing(), Direction.UP, angleDeg -> 0, sum);
+        direct.at(observer.eye(), observer.facing(), Direction.UP, DirectLight.Veil.NONE, sum);
         brightest = scene.lamps().get(Math.max(0, sum.brightest()));
         path = DirectPath.between(
                 brightest.position().heightM(),
