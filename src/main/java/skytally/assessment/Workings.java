@@ -293,8 +293,8 @@ final class Workings {
 
     private Working angularSize() {
         return new Working(
-                "w = 2 arctan( s / 2d )",
-                "w = 2 arctan( " + m(lamp.luminousSizeM()) + " / 2 × " + result(Measure.DISTANCE) + " ) = "
+                "w = 2 arctan[ s / (2 d) ]",
+                "w = 2 arctan[ " + m(lamp.luminousSizeM()) + " / (2 × " + result(Measure.DISTANCE) + ") ] = "
                         + result(Measure.ANGULAR_SIZE),
                 List.of(
                         new Working.Input(
