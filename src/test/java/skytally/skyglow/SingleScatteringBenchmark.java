@@ -31,8 +31,8 @@ import skytally.atmosphere.Molecules;
 @State(Scope.Benchmark)
 @BenchmarkMode(Mode.AverageTime)
 @OutputTimeUnit(TimeUnit.MICROSECONDS)
-@Warmup(iterations = 4, time = 1)
-@Measurement(iterations = 5, time = 1)
+@Warmup(iterations = 6, time = 300, timeUnit = TimeUnit.MILLISECONDS)
+@Measurement(iterations = 15, time = 300, timeUnit = TimeUnit.MILLISECONDS)
 @Fork(2)
 public class SingleScatteringBenchmark {
 
