@@ -12,10 +12,10 @@ import skytally.atmosphere.Clearness;
  * @param assessment its numbers
  * @param otherTilt  the tilt of the other way, in degrees
  * @param other      the numbers of the other way
- * @param airs       the numbers in other airs, for a far place; none for a near one
+ * @param airs       sky glow overhead in other airs, for a far place; none for a near one
  */
 record Answer(
-        Sentence sentence, Assessment assessment, double otherTilt, Assessment other, Map<Clearness, Assessment> airs) {
+        Sentence sentence, Assessment assessment, double otherTilt, Assessment other, Map<Clearness, Figure> airs) {
 
     Answer {
         airs = Map.copyOf(airs);

@@ -9,6 +9,7 @@ import java.util.Map;
 import org.springframework.stereotype.Component;
 import skytally.assessment.Assessment;
 import skytally.assessment.Assessor;
+import skytally.assessment.Figure;
 import skytally.atmosphere.Clearness;
 
 /** Works out answers, and remembers the last few: the same sentence always has the same answer. */
@@ -34,12 +35,13 @@ class Answers {
     }
 
     /** A far result is shown in other airs beside its own: the haze decides it. */
-    private Map<Clearness, Assessment> otherAirs(Sentence sentence) {
-        Map<Clearness, Assessment> airs = new EnumMap<>(Clearness.class);
+    private Map<Clearness, Figure> otherAirs(Sentence sentence) {
+        Map<Clearness, Figure> airs = new EnumMap<>(Clearness.class);
         if (sentence.distanceM() > FAR_M) {
             for (Clearness air : List.of(Clearness.VERY_CLEAR, Clearness.CLEAR, Clearness.HAZY)) {
                 Sentence there = sentence.with(Map.of(Blank.AIR, air.id())).settled();
-                airs.put(air, assessor.assess(new SentenceScene(there)));
+                Assessment assessment = assessor.assess(new SentenceScene(there));
+                airs.put(air, assessment.figure(SentenceScene.HERE, "zenith/sky/increase"));
             }
         }
         return airs;

@@ -5,7 +5,6 @@ import java.util.List;
 import java.util.Optional;
 import java.util.function.DoubleFunction;
 import org.jspecify.annotations.Nullable;
-import skytally.assessment.Assessment;
 import skytally.assessment.Assessment.Topic;
 import skytally.assessment.Figure;
 import skytally.assessment.Likeness;
@@ -189,11 +188,9 @@ final class KeyLines {
         }
         List<String> each = new ArrayList<>();
         for (Clearness air : Clearness.values()) {
-            Assessment there = answer.airs().get(air);
+            Figure there = answer.airs().get(air);
             if (there != null) {
-                double increase =
-                        there.figure(SentenceScene.HERE, "zenith/sky/increase").likely();
-                each.add("in " + air.words() + " air " + percent(increase));
+                each.add("in " + air.words() + " air " + percent(there.likely()));
             }
         }
         return "So far away the haze decides. Overhead, " + String.join(", ", each) + ".";

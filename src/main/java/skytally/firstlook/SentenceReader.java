@@ -136,13 +136,20 @@ final class SentenceReader {
 
     private void checkNumber(Blank blank, String text, BigDecimal value) {
         if (value.compareTo(blank.least()) < 0 || value.compareTo(blank.most()) > 0) {
-            fault(blank, "“" + quoted(text) + "” is out of bounds. Enter " + what(blank) + ".");
+            fault(blank, "“" + quoted(asTyped(blank, text, value)) + "” is out of bounds. Enter " + what(blank) + ".");
         } else if (blank.kind() == Blank.Kind.WHOLE
                 && value.stripTrailingZeros().scale() > 0) {
             fault(blank, "“" + quoted(text) + "” is not a whole number. Enter " + what(blank) + ".");
         } else {
             texts.put(blank, plain(value));
         }
+    }
+
+    /** Feet on a page in feet, though the address has metres. */
+    private String asTyped(Blank blank, String text, BigDecimal value) {
+        return isInFeet(blank) && SentenceAddress.isOrdinary(value)
+                ? SentenceAddress.feet(value.toPlainString())
+                : text;
     }
 
     /** In bounds by now, so the plain notation is short; digits beyond the twentieth say nothing. */

@@ -474,7 +474,8 @@ class FirstLookJsonTest {
                 assertThat(error.get("message").asString()).isNotBlank();
             });
             assertThat(problem.get("errors").get(1).get("message").asString())
-                    .isEqualTo("Lumens of each light must be from 0 to 10\u00a0000\u00a0000\u00a0lm.");
+                    .isEqualTo("Lumens of each light: “-5” is out of bounds. Enter a number from 0 to"
+                            + " 10\u00a0000\u00a0000\u00a0lm, such as 5200.");
         }
 
         @Test
@@ -497,7 +498,13 @@ class FirstLookJsonTest {
                     "form=sentence"
                 })
         void andTheSameWhateverElseStandsInTheAddress(String other) throws IOException {
-            assertThat(ask(BARE + "&" + other).body()).isEqualTo(ask(BARE).body());
+            JsonNode plain = look(BARE);
+            JsonNode more = look(BARE + "&" + other);
+            for (String member : List.of("direct", "glare", "sky", "eye", "guesses", "zeroPoint", "caution")) {
+                assertThat(more.get(member)).as(member).isEqualTo(plain.get(member));
+            }
+            boolean known = other.equals("units=us") || other.equals("theme=dark");
+            assertThat(more.get("notes").size() - plain.get("notes").size()).isEqualTo(known ? 0 : 1);
         }
 
         @Test

@@ -227,7 +227,8 @@ class FirstLookPageTest {
         String body = get("/?distanceM=0.3048&mountingHeightM=high&units=us");
 
         assertThat(body)
-                .contains("Distance to the lights must be from 3.281 to 656\u00a0167\u00a0ft.")
+                .contains(
+                        "Distance to the lights: “1” is out of bounds. Enter a number from 3.281 to 656\u00a0167\u00a0ft")
                 .contains("Enter a number from 0 to 1\u00a0640\u00a0ft, such as 19.7.")
                 .contains("name=\"distanceFt\" value=\"1\"", "name=\"mountingHeightFt\" value=\"high\"");
     }

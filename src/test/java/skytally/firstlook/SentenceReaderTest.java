@@ -164,20 +164,20 @@ class SentenceReaderTest {
     @ParameterizedTest(name = "{0} = {1}: {2}")
     @CsvSource(delimiter = '|', textBlock = """
             count             | ''     | How many lights is empty. Enter a whole number from 1 to 20~000, such as 24.
-            count             | -5     | How many lights must be from 1 to 20~000.
-            count             | 2.5    | How many lights must be a whole number, from 1 to 20~000.
-            count             | 0      | How many lights must be from 1 to 20~000.
-            lumens            | 1e308  | Lumens of each light must be from 0 to 10~000~000~lm.
+            count             | -5     | How many lights: “-5” is out of bounds. Enter a whole number from 1 to 20~000, such as 24.
+            count             | 2.5    | How many lights: “2.5” is not a whole number. Enter a whole number from 1 to 20~000, such as 24.
+            count             | 0      | How many lights: “0” is out of bounds. Enter a whole number from 1 to 20~000, such as 24.
+            lumens            | 1e308  | Lumens of each light: “1e308” is out of bounds. Enter a number from 0 to 10~000~000~lm, such as 5200.
             lumens            | NaN    | Lumens of each light: “NaN” is not a number. Enter a number from 0 to 10~000~000~lm, such as 5200.
             lumens            | 1,500  | Lumens of each light: “1,500” can be read in two ways: write 1500 or 1.500. Enter a number from 0 to 10~000~000~lm, such as 5200.
             air               | foggy  | Clearness of the air: “foggy” is not known. Choose one of: very-clear, clear, average, hazy.
             air               | ''     | Clearness of the air is empty. Enter one of: very-clear, clear, average, hazy.
-            tiltDeg           | -6,5   | Tilt toward you must be from 0 to 180°.
+            tiltDeg           | -6,5   | Tilt toward you: “-6,5” is out of bounds. Enter a number from 0 to 180°, such as 15.
             mountingHeightM   | six    | Height of the lights: “six” is not a number. Enter a number from 0 to 500~m, such as 6.
             eyeHeightM        | <b>    | Height of your eye: “<b>” is not a number. Enter a number from 0 to 3~000~m, such as 1.6.
-            distanceM         | 0,5    | Distance to the lights must be from 1 to 200~000~m.
-            glareAngleDeg     | 0      | Angle beside the lights at which you look must be from 0.1 to 60°.
-            groundReflectance | 12     | Share of light the ground sends back must be from 0 to 1.
+            distanceM         | 0,5    | Distance to the lights: “0,5” is out of bounds. Enter a number from 1 to 200~000~m, such as 800.
+            glareAngleDeg     | 0      | Angle beside the lights at which you look: “0” is out of bounds. Enter a number from 0.1 to 60°, such as 10.
+            groundReflectance | 12     | Share of light the ground sends back: “12” is out of bounds. Enter a number from 0 to 1, such as 0.12.
             """)
     void saysItInThesePlainWords(String field, String typed, String message) {
         assertThat(SentenceReader.read(Map.of(field, List.of(typed))).faults())
@@ -231,8 +231,8 @@ class SentenceReaderTest {
         assertThat(faults)
                 .extracting(Fault::message)
                 .containsExactly(
-                        "Lumens of each light must be from 0 to 10\u00a0000\u00a0000\u00a0lm.",
-                        "Height of the lights must be from 0 to 1\u00a0640\u00a0ft.",
+                        "Lumens of each light: “-1” is out of bounds. Enter a number from 0 to 10\u00a0000\u00a0000\u00a0lm, such as 5200.",
+                        "Height of the lights: “1643.7” is out of bounds. Enter a number from 0 to 1\u00a0640\u00a0ft, such as 19.7.",
                         "Distance to the lights: “far” is not a number. Enter a number from 3.281 to 656\u00a0167\u00a0ft, such as 2620.");
         // a foot is 0.3048 m exactly (international yard and pound agreement, 1959)
         for (String[] told : new String[][] {
