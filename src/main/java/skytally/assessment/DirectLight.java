@@ -7,6 +7,7 @@ import skytally.atmosphere.Atmosphere;
 import skytally.atmosphere.DirectPath;
 import skytally.atmosphere.ExponentialLayer;
 import skytally.atmosphere.Molecules;
+import skytally.geometry.Arcsine;
 import skytally.geometry.Direction;
 import skytally.geometry.Position;
 import skytally.geometry.Rotation;
@@ -23,12 +24,15 @@ import skytally.spectrum.Spectrum;
 public final class DirectLight {
 
     private static final double EARTH = DirectPath.EFFECTIVE_EARTH_RADIUS_M;
+    private static final double DEGREES_PER_RADIAN = 180 / Math.PI;
 
     private final int lamps;
     private final double[] east;
     private final double[] north;
     private final double[] height;
     private final double[] horizon;
+    private final double[] moleculesAtLamp; // density, 1 at the ground
+    private final double[] hazeAtLamp;
     private final double[] turn; // nine for each lamp: from the world's frame to its own, row by row
     private final double[] lumens;
     private final double[] count;
@@ -46,6 +50,8 @@ public final class DirectLight {
         north = new double[lamps];
         height = new double[lamps];
         horizon = new double[lamps];
+        moleculesAtLamp = new double[lamps];
+        hazeAtLamp = new double[lamps];
         turn = new double[9 * lamps];
         lumens = new double[lamps];
         count = new double[lamps];
@@ -59,6 +65,8 @@ public final class DirectLight {
             north[i] = lamp.position().northM();
             height[i] = lamp.position().heightM();
             horizon[i] = DirectPath.horizonDistanceM(height[i]);
+            moleculesAtLamp[i] = ExponentialLayer.density(Molecules.SCALE_HEIGHT_M, height[i]);
+            hazeAtLamp[i] = ExponentialLayer.density(aerosolHeight, height[i]);
             lumens[i] = lamp.flux().lumens();
             count[i] = lamp.count();
             light[i] = lamp.light();
@@ -123,6 +131,9 @@ public final class DirectLight {
     /** How strongly one lux at an angle veils: cd/m² per lx. */
     public interface Veil {
 
+        /** No veil is asked for. */
+        Veil NONE = angleDeg -> 0;
+
         /** {@code Lv / E} at an angle between the light and the line of sight, in degrees; 0 outside its validity. */
         double perLux(double angleDeg);
     }
@@ -143,48 +154,64 @@ public final class DirectLight {
         sum.veilCdM2 = 0;
         sum.brightestLx = 0;
         sum.brightest = -1;
-        double eyeHorizon = DirectPath.horizonDistanceM(eye.heightM());
+        boolean veiled = veil != Veil.NONE;
+        double eyeHeight = eye.heightM();
+        double eyeRadius = EARTH + eyeHeight;
+        double eyeHorizon = DirectPath.horizonDistanceM(eyeHeight);
+        double eyeMolecules = ExponentialLayer.density(Molecules.SCALE_HEIGHT_M, eyeHeight);
+        double eyeHaze = ExponentialLayer.density(aerosolHeight, eyeHeight);
         for (int i = 0; i < lamps; i++) {
             double dx = eye.eastM() - east[i];
             double dy = eye.northM() - north[i];
-            double ground = Math.sqrt(dx * dx + dy * dy);
-            if (ground > horizon[i] + eyeHorizon) {
+            double groundSquared = dx * dx + dy * dy;
+            double view = horizon[i] + eyeHorizon;
+            if (groundSquared > view * view) {
                 continue;
             }
-            double half = ground / (2 * EARTH);
-            half -= half * half * half / 6; // sine of a small angle
-            double rise = height[i] - eye.heightM();
-            double squared = rise * rise + 4 * (EARTH + height[i]) * (EARTH + eye.heightM()) * half * half;
-            double distance = Math.sqrt(squared);
-            double sineAtLamp = -(rise + (EARTH + eye.heightM()) * 2 * half * half) / distance;
-            double level = ground == 0 ? 0 : Math.sqrt(1 - sineAtLamp * sineAtLamp) / ground;
+            // φ is the angle at the Earth's centre; sin φ / φ and 2 (1 − cos φ) by their series, φ being small
+            double turnSquared = groundSquared / (EARTH * EARTH);
+            double sine = 1 - turnSquared * (1 - turnSquared / 20) / 6;
+            double drop = turnSquared * (1 - turnSquared * (1 - turnSquared / 30) / 12);
+            double lampRadius = EARTH + height[i];
+            double rise = height[i] - eyeHeight;
+            double inverse = 1 / Math.sqrt(rise * rise + drop * lampRadius * eyeRadius);
+            if (inverse == Double.POSITIVE_INFINITY) {
+                throw new IllegalArgumentException("Lamp and eye must be apart");
+            }
+            double upAtLamp = -(rise + eyeRadius * drop / 2) * inverse;
+            double level = eyeRadius / EARTH * sine * inverse;
             double x = dx * level;
             double y = dy * level;
             int at = 9 * i;
             double perLumen = light[i].perLumen(
-                    turn[at] * x + turn[at + 1] * y + turn[at + 2] * sineAtLamp,
-                    turn[at + 3] * x + turn[at + 4] * y + turn[at + 5] * sineAtLamp,
-                    turn[at + 6] * x + turn[at + 7] * y + turn[at + 8] * sineAtLamp);
+                    turn[at] * x + turn[at + 1] * y + turn[at + 2] * upAtLamp,
+                    turn[at + 3] * x + turn[at + 4] * y + turn[at + 5] * upAtLamp,
+                    turn[at + 6] * x + turn[at + 7] * y + turn[at + 8] * upAtLamp);
             if (perLumen == 0) {
                 continue;
             }
-            double oneInVacuum = lumens[i] * perLumen / squared;
-            double molecules = ExponentialLayer.on(EARTH, Molecules.SCALE_HEIGHT_M, height[i], sineAtLamp, distance);
-            double haze = ExponentialLayer.on(EARTH, aerosolHeight, height[i], sineAtLamp, distance);
+            double oneInVacuum = lumens[i] * perLumen * inverse * inverse;
+            double distance = 1 / inverse;
+            double molecules = ExponentialLayer.between(
+                    Molecules.SCALE_HEIGHT_M, lampRadius, upAtLamp, distance, moleculesAtLamp[i], eyeMolecules);
+            double haze =
+                    ExponentialLayer.between(aerosolHeight, lampRadius, upAtLamp, distance, hazeAtLamp[i], eyeHaze);
             double one = oneInVacuum * passed[i].through(molecules, haze);
             if (one > sum.brightestLx && count[i] > 0) {
                 sum.brightestLx = one;
                 sum.brightest = i;
             }
-            double sineAtEye = (rise - (EARTH + height[i]) * 2 * half * half) / distance;
-            double levelAtEye = ground == 0 ? 0 : -Math.sqrt(1 - sineAtEye * sineAtEye) / ground;
+            double upAtEye = (rise - lampRadius * drop / 2) * inverse;
+            double levelAtEye = -lampRadius / EARTH * sine * inverse;
             double towardX = dx * levelAtEye;
             double towardY = dy * levelAtEye;
-            double onWindow = facing.x() * towardX + facing.y() * towardY + facing.z() * sineAtEye;
+            double onWindow = facing.x() * towardX + facing.y() * towardY + facing.z() * upAtEye;
             sum.inVacuumLx += count[i] * oneInVacuum;
             sum.windowLx += count[i] * oneInVacuum * Math.max(0, onWindow);
             sum.seenLx += count[i] * one;
-            sum.veilCdM2 += count[i] * one * veil.perLux(angleDeg(look, towardX, towardY, sineAtEye));
+            if (veiled) {
+                sum.veilCdM2 += count[i] * one * veil.perLux(angleDeg(look, towardX, towardY, upAtEye));
+            }
         }
     }
 
@@ -196,7 +223,7 @@ public final class DirectLight {
         double chordY = look.y() + sign * y;
         double chordZ = look.z() + sign * z;
         double half = Math.sqrt(chordX * chordX + chordY * chordY + chordZ * chordZ) / 2;
-        double angle = 2 * Math.asin(Math.min(1, half));
-        return Math.toDegrees(near ? angle : Math.PI - angle);
+        double angle = 2 * DEGREES_PER_RADIAN * Arcsine.of(half);
+        return near ? angle : 180 - angle;
     }
 }

@@ -63,7 +63,7 @@ final class PlaceNumbers {
         Atmosphere air = air();
         DirectLight.Sum sum = new DirectLight.Sum();
         DirectLight direct = new DirectLight(scene.lamps(), air);
-        direct.at(observer.eye(), observer.facing(), Direction.UP, angleDeg -> 0, sum);
+        direct.at(observer.eye(), observer.facing(), Direction.UP, DirectLight.Veil.NONE, sum);
         brightest = scene.lamps().get(Math.max(0, sum.brightest()));
         path = DirectPath.between(
                 brightest.position().heightM(),
@@ -148,6 +148,9 @@ final class PlaceNumbers {
         numbers[Measure.HALO.ordinal()] = light.lampsCdM2();
         Luminance natural = naturalOnVisualScale();
         numbers[Measure.VEIL_NATURAL_SKIES.ordinal()] = veil / natural.candelaPerSquareMetre();
+        double background = natural.candelaPerSquareMetre() + veil + light.lampsCdM2();
+        numbers[Measure.LIMIT_BESIDE.ordinal()] = faintestStar(
+                ZERO_POINT.surfaceBrightness(new Luminance(background)).magArcsec2());
         if (veil > 0) {
             numbers[Measure.VEIL_BRIGHTNESS.ordinal()] =
                     ZERO_POINT.surfaceBrightness(new Luminance(veil)).magArcsec2();

@@ -23,6 +23,9 @@ final class SentenceAddress {
     /** A button that hangs the lights another way: the tilt in degrees, or nothing for as described. */
     static final String TILT_TO = "tiltTo";
 
+    /** Names of the blanks whose guesses stood in the form; one that still stands there is still a guess. */
+    static final String GUESSED = "guessed";
+
     /** The blanks the form asks for outright; the others may be left empty and are guessed then. */
     private static final List<Blank> ASKED_FOR = List.of(
             Blank.COUNT, Blank.LUMENS, Blank.SPECTRAL_CLASS, Blank.SHAPE, Blank.MOUNTING_HEIGHT, Blank.DISTANCE);
@@ -74,7 +77,8 @@ final class SentenceAddress {
         Map<String, Object> values = new HashMap<>();
         for (Blank blank : Blank.values()) {
             String text = text(blank, sent);
-            if (text != null && !(text.isBlank() && !isAskedFor(blank))) {
+            boolean left = text != null && text.isBlank() && !isAskedFor(blank);
+            if (text != null && !left && !isStillAGuess(blank, text, sent)) {
                 address.queryParam(blank.field(), "{" + blank.field() + "}");
                 values.put(blank.field(), asWritten(blank, text));
             }
@@ -87,6 +91,17 @@ final class SentenceAddress {
             }
         }
         return address.encode().buildAndExpand(values).toUriString();
+    }
+
+    private static boolean isStillAGuess(Blank blank, String text, MultiValueMap<String, String> sent) {
+        return sent.getOrDefault(GUESSED, List.of()).contains(blank.field())
+                && asWritten(blank, text).equals(asWritten(blank, guessInForm(blank, sent)));
+    }
+
+    /** The guess as the form showed it, taken back to metres where it was shown in feet. */
+    private static String guessInForm(Blank blank, MultiValueMap<String, String> sent) {
+        String likely = Guesses.of(blank).likely();
+        return blank.isLength() && sent.containsKey(feetField(blank)) ? metres(feet(likely)) : likely;
     }
 
     private static @Nullable String text(Blank blank, MultiValueMap<String, String> sent) {

@@ -24,6 +24,11 @@ import skytally.web.Switches.Units;
 final class SentenceReader {
 
     private static final int QUOTED = 40;
+    private static final int MOST_NOTES = 5;
+
+    /** What may stand in an address beside the blanks. */
+    private static final Map<String, List<String>> SWITCHES =
+            Map.of("units", List.of("metric", "us"), "theme", List.of("day", "dark", "telescope"));
 
     /**
      * One thing wrong.
@@ -73,6 +78,24 @@ final class SentenceReader {
         return new Result(Optional.of(sentence), List.of());
     }
 
+    /** What stands in the address and means nothing here, in a sentence each, so that a slip of the pen is seen. */
+    static List<String> passedOver(Map<String, ? extends List<@Nullable String>> typed) {
+        List<String> notes = new ArrayList<>();
+        for (Map.Entry<String, ? extends List<@Nullable String>> each : typed.entrySet()) {
+            String name = each.getKey();
+            String word = each.getValue().isEmpty() ? null : each.getValue().get(0);
+            if (SWITCHES.containsKey(name)) {
+                if (word != null && !SWITCHES.get(name).contains(word)) {
+                    notes.add("“" + quoted(word) + "” is no choice of " + name + " and was passed over; there is "
+                            + String.join(", ", SWITCHES.get(name)) + ".");
+                }
+            } else if (Blank.byField(name).isEmpty() && notes.size() < MOST_NOTES) {
+                notes.add("“" + quoted(name) + "” is the name of no blank and was passed over.");
+            }
+        }
+        return notes;
+    }
+
     private void read(Blank blank, @Nullable List<@Nullable String> typed) {
         if (typed == null || typed.isEmpty()) {
             guessed.add(blank);
@@ -107,16 +130,16 @@ final class SentenceReader {
         if (reading instanceof NumberReader.Unreadable unreadable) {
             fault(blank, "“" + quoted(text) + "” " + unreadable.why() + ". Enter " + what(blank) + ".");
         } else if (reading instanceof NumberReader.Number number) {
-            checkNumber(blank, number.value());
+            checkNumber(blank, text, number.value());
         }
     }
 
-    private void checkNumber(Blank blank, BigDecimal value) {
+    private void checkNumber(Blank blank, String text, BigDecimal value) {
         if (value.compareTo(blank.least()) < 0 || value.compareTo(blank.most()) > 0) {
-            fault(blank, "must be " + bounds(blank) + ".");
+            fault(blank, "“" + quoted(text) + "” is out of bounds. Enter " + what(blank) + ".");
         } else if (blank.kind() == Blank.Kind.WHOLE
                 && value.stripTrailingZeros().scale() > 0) {
-            fault(blank, "must be a whole number, " + bounds(blank) + ".");
+            fault(blank, "“" + quoted(text) + "” is not a whole number. Enter " + what(blank) + ".");
         } else {
             texts.put(blank, plain(value));
         }

@@ -87,7 +87,7 @@ final class SentenceScene implements OpenScene {
                 "lights",
                 s.count(),
                 new Position(0, 0, s.mountingHeightM()),
-                new Attitude(0, s.tiltDeg(), 0),
+                new Attitude(shape.facesUp() ? 180 : 0, s.tiltDeg(), 0), // leans its light toward the eye
                 new LuminousFlux(s.lumens()),
                 shape.distribution(),
                 s.spectralClass().spectrum(),
@@ -110,7 +110,7 @@ final class SentenceScene implements OpenScene {
                         new Look(
                                 Look.BESIDE,
                                 Look.Purpose.GLARE,
-                                beside(path.altitudeAtEyeRad(), Math.toRadians(s.glareAngleDeg()))),
+                                beside(Math.max(0, path.altitudeAtEyeRad()), Math.toRadians(s.glareAngleDeg()))),
                         new Look(Look.ZENITH, Look.Purpose.SKY, Direction.UP),
                         new Look(Look.TOWARD_SITE, Look.Purpose.SKY, Direction.toward(Math.PI, TOWARD_SITE_ALTITUDE))));
     }

@@ -222,9 +222,9 @@ public sealed interface VeilingLuminance {
 
         @Override
         public double unchecked(double angleDeg) {
-            double squared = angleDeg * angleDeg;
-            return 10 / (squared * angleDeg)
-                    + (5 / squared + 0.1 * pigment / angleDeg) * Eyes.cieAgeFactor(ageYears)
+            double inverse = 1 / angleDeg;
+            return inverse * inverse * inverse * 10
+                    + inverse * (5 * inverse + 0.1 * pigment) * Eyes.cieAgeFactor(ageYears)
                     + 0.0025 * pigment;
         }
 

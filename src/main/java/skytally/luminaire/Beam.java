@@ -1,5 +1,6 @@
 package skytally.luminaire;
 
+import java.util.stream.DoubleStream;
 import skytally.notation.QuantityFormat;
 
 /**
@@ -44,7 +45,13 @@ record Beam(double exponent) implements IntensityDistribution {
     @Override
     public double[] breaksRad() {
         double half = StrictMath.acos(StrictMath.pow(0.5, 1 / exponent));
-        return half < Math.PI / 8 ? new double[] {half, 2 * half, 4 * half, Math.PI / 2} : new double[] {Math.PI / 2};
+        if (half >= Math.PI / 8) {
+            return new double[] {Math.PI / 2};
+        }
+        // at 8 widths it has fallen to 2^-64 and nothing beyond counts
+        return DoubleStream.of(half, 2 * half, 4 * half, Math.min(8 * half, Math.PI / 2), Math.PI / 2)
+                .distinct()
+                .toArray();
     }
 
     @Override

@@ -26,7 +26,7 @@ public final class SingleScattering {
 
     private static final int NODES = 12;
     /** Longest stretch of y that one set of nodes covers. */
-    private static final double PANEL = 1.6;
+    private static final double PANEL = 2.4;
 
     private static final double[] NODE = new double[NODES];
     private static final double[] WEIGHT = new double[NODES];
@@ -43,6 +43,7 @@ public final class SingleScattering {
     private static final double MOLECULES_HEIGHT = Molecules.SCALE_HEIGHT_M;
 
     private final Aerosol aerosol;
+    private final double aerosolHeight;
     private final double[] molecularDepth;
     private final double[] aerosolDepth;
 
@@ -60,6 +61,7 @@ public final class SingleScattering {
     /** With the optical depths of both layers given outright, one pair for each wavelength. */
     SingleScattering(Aerosol aerosol, double[] molecularDepth, double[] aerosolDepth) {
         this.aerosol = aerosol;
+        this.aerosolHeight = aerosol.scaleHeightM();
         this.molecularDepth = molecularDepth;
         this.aerosolDepth = aerosolDepth;
     }
@@ -82,6 +84,10 @@ public final class SingleScattering {
         private final Emission light;
         private final double lightHeight;
         private final double eyeHeight;
+        private final double moleculesAtLight; // densities, 1 at the ground
+        private final double hazeAtLight;
+        private final double moleculesAtEye;
+        private final double hazeAtEye;
         private final double eyeX;
         private final double eyeZ; // from the light, not from the ground
         private final double viewX;
@@ -96,6 +102,10 @@ public final class SingleScattering {
             this.light = light;
             lightHeight = light.heightM();
             eyeHeight = line.eyeHeightM();
+            moleculesAtLight = ExponentialLayer.density(MOLECULES_HEIGHT, lightHeight);
+            hazeAtLight = ExponentialLayer.density(aerosolHeight, lightHeight);
+            moleculesAtEye = ExponentialLayer.density(MOLECULES_HEIGHT, eyeHeight);
+            hazeAtEye = ExponentialLayer.density(aerosolHeight, eyeHeight);
             double turn = line.groundDistanceM() / EARTH;
             double sine = StrictMath.sin(turn);
             double half = StrictMath.sin(turn / 2);
@@ -133,8 +143,13 @@ public final class SingleScattering {
 
         void addTo(double[] sum) {
             double[] cuts = cuts();
+            double fromY = yOf(cuts[0]);
             for (int i = 1; i < cuts.length; i++) {
-                addPiece(yOf(cuts[i - 1]), yOf(cuts[i]), sum);
+                double toY = yOf(cuts[i]);
+                if (toY > fromY) {
+                    addPiece(fromY, toY, sum);
+                }
+                fromY = toY;
             }
         }
 
@@ -176,22 +191,26 @@ public final class SingleScattering {
             }
             double cosine = (nearest - s) / distance; // light travels S→P, then P→O along −v
             double height = heightAt(s);
-            double aerosolHeight = aerosol.scaleHeightM();
-            double molecules = Math.exp(-height / MOLECULES_HEIGHT) / MOLECULES_HEIGHT * Molecules.phase(cosine);
-            double haze = Math.exp(-height / aerosolHeight)
-                    / aerosolHeight
-                    * aerosol.singleScatteringAlbedo()
-                    * aerosol.phase(cosine);
-            double molecularAir = ExponentialLayer.on(EARTH, MOLECULES_HEIGHT, lightHeight, up, distance)
-                    + ExponentialLayer.on(EARTH, MOLECULES_HEIGHT, eyeHeight, zenithCosine, s);
-            double hazyAir = ExponentialLayer.on(EARTH, aerosolHeight, lightHeight, up, distance)
-                    + ExponentialLayer.on(EARTH, aerosolHeight, eyeHeight, zenithCosine, s);
+            double moleculesThere = ExponentialLayer.density(MOLECULES_HEIGHT, height);
+            double hazeThere = ExponentialLayer.density(aerosolHeight, height);
+            double molecularAir =
+                    air(MOLECULES_HEIGHT, s, distance, up, moleculesAtLight, moleculesThere, moleculesAtEye);
+            double hazyAir = air(aerosolHeight, s, distance, up, hazeAtLight, hazeThere, hazeAtEye);
+            double molecules = moleculesThere / MOLECULES_HEIGHT * Molecules.phase(cosine);
+            double haze = hazeThere / aerosolHeight * aerosol.singleScatteringAlbedo() * aerosol.phase(cosine);
             double geometry = intensity / squared * ds;
             for (int i = 0; i < sum.length; i++) {
                 double scattered = molecularDepth[i] * molecules + aerosolDepth[i] * haze;
                 sum[i] +=
                         geometry * scattered * Math.exp(-molecularDepth[i] * molecularAir - aerosolDepth[i] * hazyAir);
             }
+        }
+
+        /** Air on the way from the light to a point and on from there to the eye. */
+        private double air(
+                double scaleHeight, double s, double distance, double up, double atLight, double there, double atEye) {
+            return ExponentialLayer.between(scaleHeight, EARTH + lightHeight, up, distance, atLight, there)
+                    + ExponentialLayer.between(scaleHeight, EARTH + eyeHeight, zenithCosine, s, atEye, there);
         }
 
         /** √(r² + 2 r s cos z + s²) − R, written so that nothing is lost to rounding near the ground. */
@@ -213,7 +232,7 @@ public final class SingleScattering {
 
         /** Both ends of the line and every edge of the emission between them, in order. */
         private double[] cuts() {
-            double[] found = new double[2 + 2 * (light.edges().size() + 2)];
+            double[] found = new double[2 + 3 * (light.edges().size() + 2)];
             int count = 0;
             found[count++] = 0;
             found[count++] = end;
@@ -231,23 +250,28 @@ public final class SingleScattering {
             return cuts;
         }
 
-        /** Where {@code (P · axis)² = cosine² |P|²}; a plane gives a linear equation, not a double root. */
+        /**
+         * Where {@code (P · axis)² = cosine² |P|²}; a plane gives a linear equation, not a double root. A cone is also
+         * cut where the line comes nearest its axis, for a beam may graze the line without its edge reaching it.
+         */
         private int addCuts(Emission.Cone edge, double[] found, int count) {
             double atEye = eyeX * edge.axisAhead() + eyeZ * edge.axisUp();
             double gain = viewX * edge.axisAhead() + viewY * edge.axisLeft() + viewZ * edge.axisUp();
             if (edge.cosine() == 0) {
                 return addCut(-atEye / gain, found, count);
             }
+            double apartSquared = eyeX * eyeX + eyeZ * eyeZ;
+            int nearer = addCut((gain * apartSquared + atEye * nearest) / (atEye + gain * nearest), found, count);
             double square = edge.cosine() * edge.cosine();
             double a = gain * gain - square;
             double b = atEye * gain + square * nearest;
-            double c = atEye * atEye - square * (eyeX * eyeX + eyeZ * eyeZ);
+            double c = atEye * atEye - square * apartSquared;
             double root = Math.sqrt(b * b - a * c);
             if (!(root >= 0)) {
-                return count;
+                return nearer;
             }
             double far = -(b + Math.copySign(root, b));
-            return addCut(c / far, found, addCut(far / a, found, count));
+            return addCut(c / far, found, addCut(far / a, found, nearer));
         }
 
         private int addCut(double s, double[] found, int count) {
