@@ -15,8 +15,8 @@ import org.openjdk.jmh.runner.options.CommandLineOptions;
 import org.openjdk.jmh.runner.options.OptionsBuilder;
 
 /**
- * Runs the benchmarks and says what they come to, as ratios of figures of one run: what a machine or a neighbour slows
- * down, it slows down on both sides. Takes the options of JMH.
+ * Runs the benchmarks and says what they come to, as ratios of figures of one run: a slow machine is slow on both
+ * sides. Takes the options of JMH.
  */
 public final class Benchmarks {
 
@@ -57,11 +57,13 @@ public final class Benchmarks {
         RunResult above = results.get(over);
         RunResult below = results.get(under);
         if (above != null && below != null) {
-            print(
-                    what,
-                    above.getPrimaryResult().getScore()
-                            / below.getPrimaryResult().getScore());
+            print(what, quickest(above) / quickest(below));
         }
+    }
+
+    /** The iteration that neighbours on the machine disturbed least. */
+    private static double quickest(RunResult result) {
+        return result.getPrimaryResult().getStatistics().getMin();
     }
 
     private void allocation(String what, String name) {

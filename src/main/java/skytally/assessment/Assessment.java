@@ -29,6 +29,7 @@ public record Assessment(
     /** What a note is about. */
     public enum Topic {
         BELOW_HORIZON,
+        NO_LIGHT_AT_ALL,
         NO_DIRECT_LIGHT,
         TOO_NEAR,
         SMALL_PATCH,

@@ -11,7 +11,8 @@ import skytally.spectrum.Spectrum;
  *
  * <p>With F_m and F_a the air on the path in molecules and haze, T = ⟨exp(−τ_m F_m − τ_a F_a)⟩ over the spectrum
  * weighted by V(λ). Its logarithm is summed from the first three cumulants of the two optical depths, taken once per
- * spectrum and air: within 2e-4 of the exact mean on level paths of up to 50 km in any of the four airs.
+ * spectrum and air. On level paths of up to 50 km in any of the four airs it is within 2e-4 of the exact mean, and
+ * within 0.5 % of it while a hundredth comes through.
  */
 final class LuminousTransmission {
 

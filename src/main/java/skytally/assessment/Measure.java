@@ -36,6 +36,12 @@ enum Measure {
     VEIL_REACH(Look.Purpose.GLARE, "glare/reach", "Angle inside which the veil exceeds a natural sky", Unit.DEGREE),
     HALO(Look.Purpose.GLARE, "glare/halo", "Light the air scatters there", Unit.CANDELA_PER_SQUARE_METRE),
 
+    LIMIT_BESIDE(
+            Look.Purpose.GLARE,
+            "eye/limit-in-view",
+            "Faintest star beside the lights, with them in view",
+            Unit.MAGNITUDE),
+
     SKY_ARTIFICIAL(Look.Purpose.SKY, "sky/artificial", "Sky glow of the lights", Unit.CANDELA_PER_SQUARE_METRE),
     SKY_NATURAL(Look.Purpose.SKY, "sky/natural", "Natural sky", Unit.CANDELA_PER_SQUARE_METRE),
     SKY_NATURAL_BRIGHTNESS(

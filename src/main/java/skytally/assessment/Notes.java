@@ -21,7 +21,8 @@ final class Notes {
         add(
                 Topic.FIRST_SCATTERING,
                 "Sky glow counts light scattered once only. More scattering adds to it, by about 15 % overhead at 1 km"
-                        + " and as much again at 25 km, so read every sky number as \"at least\".");
+                        + " and as much again at 25 km, so read every sky number as \"at least\"."
+                        + " Air, emission and ground leave any such method uncertain by 30 to 50 %, beside the ranges shown.");
     }
 
     List<Note> all() {
@@ -35,6 +36,9 @@ final class Notes {
                     Topic.BELOW_HORIZON,
                     "The lights stand below the horizon: the curve of the Earth hides them, and no direct light reaches"
                             + " the eye by this data. Light still arrives from the sky.");
+        } else if (numbers.scene().lamps().stream()
+                .allMatch(lamp -> lamp.allFlux().lumens() == 0)) {
+            add(Topic.NO_LIGHT_AT_ALL, "No light leaves these lamps by this data.");
         } else if (numbers.get(Measure.ILLUMINANCE) == 0) {
             add(
                     Topic.NO_DIRECT_LIGHT,
@@ -72,12 +76,12 @@ final class Notes {
         if (size >= PlaceNumbers.WIDEST_STAR_ARCMIN) {
             add(
                     Topic.NOT_A_POINT,
-                    "One lamp's bright part is " + arcminutes
+                    "One lamp's bright part, " + across(numbers) + " is " + arcminutes
                             + " wide, so it is no point and no star is compared with it.");
         } else if (size >= POINT_ARCMIN) {
             add(
                     Topic.SMALL_PATCH,
-                    "One lamp's bright part is " + arcminutes
+                    "One lamp's bright part, " + across(numbers) + " is " + arcminutes
                             + " wide: a small patch, with the magnitude of its total light.");
         }
         if (one >= PlaceNumbers.fullMoonLx()) {
@@ -93,6 +97,12 @@ final class Notes {
                             + QuantityFormat.decimals(numbers.get(Measure.SCOTOPIC_MAGNITUDE), 1)
                                     .plain() + ".");
         }
+    }
+
+    /** The size of the bright part is usual for the kind of fitting, and no blank of anybody's. */
+    private static String across(PlaceNumbers numbers) {
+        return "taken as "
+                + QuantityFormat.atMost(numbers.brightest().luminousSizeM(), 2).plain() + "\u00a0m across,";
     }
 
     private static double ground(PlaceNumbers numbers) {

@@ -147,6 +147,9 @@ final class PlaceNumbers {
         numbers[Measure.HALO.ordinal()] = light.lampsCdM2();
         Luminance natural = naturalOnVisualScale();
         numbers[Measure.VEIL_NATURAL_SKIES.ordinal()] = veil / natural.candelaPerSquareMetre();
+        double background = natural.candelaPerSquareMetre() + veil + light.lampsCdM2();
+        numbers[Measure.LIMIT_BESIDE.ordinal()] = faintestStar(
+                ZERO_POINT.surfaceBrightness(new Luminance(background)).magArcsec2());
         if (veil > 0) {
             numbers[Measure.VEIL_BRIGHTNESS.ordinal()] =
                     ZERO_POINT.surfaceBrightness(new Luminance(veil)).magArcsec2();

@@ -14,7 +14,8 @@ import skytally.spectrum.Spectrum;
  * two are never turned into one another afterwards.
  *
  * <p>The spectrum is first gathered on a grid of 5 nm, each part shared between its two neighbours so that its weight
- * and its mean wavelength are kept; the air is so smooth that this moves no result by more than 2e-4.
+ * and its mean wavelength are kept. All in all a sky comes out within 4e-4 of the air worked out at every half
+ * nanometre for lights up to 10 km away, and within 2.5e-3 at 50 km low on the far side, whatever the spectrum.
  */
 final class SpectralSum {
 

@@ -79,6 +79,7 @@ final class Workings {
             case VEIL_NATURAL_SKIES -> veilInSkies(look);
             case VEIL_REACH -> veilReach(look);
             case HALO -> halo(look);
+            case LIMIT_BESIDE -> limitBeside(look);
             case SKY_ARTIFICIAL -> artificial(look);
             case SKY_NATURAL -> naturalLuminance(look);
             case SKY_NATURAL_BRIGHTNESS -> naturalBrightness(look);
@@ -292,8 +293,8 @@ final class Workings {
 
     private Working angularSize() {
         return new Working(
-                "w = 2 arctan( s / 2d )",
-                "w = 2 arctan( " + m(lamp.luminousSizeM()) + " / 2 × " + result(Measure.DISTANCE) + " ) = "
+                "w = 2 arctan[ s / (2 d) ]",
+                "w = 2 arctan[ " + m(lamp.luminousSizeM()) + " / (2 × " + result(Measure.DISTANCE) + ") ] = "
                         + result(Measure.ANGULAR_SIZE),
                 List.of(
                         new Working.Input(
@@ -440,6 +441,22 @@ final class Workings {
                 List.of(
                         FIRST_ORDER,
                         "This is light of the air itself, for cameras too; it adds to the sky, the veil does not."));
+    }
+
+    private Working limitBeside(int look) {
+        return new Working(
+                "B = L₀ · 10^(−0.4 · 22.0) + L_v + L,   E_t and m as for the sky alone",
+                "B = " + written(PlaceNumbers.naturalOnVisualScale().candelaPerSquareMetre(), " cd/m²") + " + "
+                        + result(Measure.VEIL, look) + " + " + result(Measure.HALO, look) + " gives m = "
+                        + result(Measure.LIMIT_BESIDE, look),
+                List.of(
+                        worked("Veil in the eye", "L_v", result(Measure.VEIL, look), "its own working"),
+                        worked("Light the air scatters there", "L", result(Measure.HALO, look), "its own working"),
+                        constant("Field factor", "F", "2 (1.4 to 2.4 between people)")),
+                cite("crumey-2014", "cie-146", "falchi-2016"),
+                List.of(
+                        "A natural sky of 22.0 with the veil over it and the lit air in it. An estimate and a best case: a"
+                                + " lamp in view also lowers the eye's sensitivity."));
     }
 
     private Working artificial(int look) {
@@ -606,7 +623,7 @@ final class Workings {
     }
 
     private static Working.Input constant(String name, String symbol, String value) {
-        return new Working.Input(name, symbol, value, Known.given("convention, see the sources"));
+        return new Working.Input(name, symbol, value, Known.assumed("convention, see the sources"));
     }
 
     private static List<Citation> cite(String... keys) {

@@ -10,7 +10,8 @@ package skytally.atmosphere;
  *   F = √π / 2aH · [ exp(−h₁/H) E(b₁) − exp(−h₂/H) E(b₂) ]
  * </pre>
  * and one through a lowest point is the sum of two climbs. Exact to second order in the Earth's curve, the last
- * factor of c standing for most of the third: within 2e-4 on paths of 100 km along the ground, 1e-3 on 300 km.
+ * factor of c standing for most of the third: within 2e-4 on paths of 100 km along the ground, and
+ * 1e-3 on 300 km reckoned from the lower end.
  *
  * <p>Where both ends lie within a tenth of H in height and the path sags by less than x = cL²/4H = 0.005 below the
  * straight slope between them, the two terms would nearly cancel. There Simpson's rule on the slope, with the sag's

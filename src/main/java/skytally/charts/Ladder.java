@@ -370,7 +370,7 @@ public final class Ladder {
                     stroke[3]);
             svg.text(
                     "text",
-                    mark.name(),
+                    isOffTheScale(mark) ? mark.name() + ", off the scale" : mark.name(),
                     "x",
                     LABEL_X,
                     "y",
@@ -396,6 +396,11 @@ public final class Ladder {
         svg.close("text");
     }
 
+    private static boolean isOffTheScale(Mark mark) {
+        double decades = Math.log10(mark.lux());
+        return decades > HIGHEST_DECADE || decades < LOWEST_DECADE;
+    }
+
     private void drawMark(Svg svg, Mark mark) {
         double at = yOfLux(mark.lux());
         if (!mark.whatIf() && mark.high() > mark.low()) {
@@ -419,7 +424,7 @@ public final class Ladder {
                 "class",
                 mark.whatIf() ? "app-mark--hollow" : "app-mark");
         double decades = Math.log10(mark.lux());
-        if (decades > HIGHEST_DECADE || decades < LOWEST_DECADE) {
+        if (isOffTheScale(mark)) {
             String arrow = decades > HIGHEST_DECADE
                     ? " " + Svg.length(at - 14) + "l-6 9h12z"
                     : " " + Svg.length(at + 14) + "l-6 -9h12z";

@@ -40,8 +40,9 @@ class FirstLookController {
             plain.setExpandUriTemplateVariables(false);
             return new ModelAndView(plain);
         }
-        SentenceReader.Result read = SentenceReader.read(sent);
+        SentenceReader.Result read = SentenceReader.read(sent, switches.units());
         ModelAndView page = new ModelAndView("firstlook/page");
+        page.addObject("passedOver", SentenceReader.passedOver(sent));
         page.addObject("form", SentenceForm.of(sent, read, switches.units()));
         read.sentence()
                 .map(answers::to)
@@ -58,7 +59,7 @@ class FirstLookController {
         SentenceReader.Result read = SentenceReader.read(sent);
         Sentence sentence = read.sentence().orElseThrow(() -> new InvalidInputException(faults(read)));
         String caution = messages.getMessage("caution", null, Locale.ENGLISH);
-        return FirstLookJson.of(answers.to(sentence), caution);
+        return FirstLookJson.of(answers.to(sentence), SentenceReader.passedOver(sent), caution);
     }
 
     private static List<InvalidInputException.Fault> faults(SentenceReader.Result read) {

@@ -3,6 +3,7 @@ package skytally.firstlook;
 import java.math.BigDecimal;
 import java.util.ArrayList;
 import java.util.List;
+import java.util.stream.Stream;
 import org.jspecify.annotations.Nullable;
 import skytally.assessment.Assessment;
 import skytally.assessment.Figure;
@@ -56,15 +57,14 @@ record FirstLookJson(
     /** A blank that was left out; numbers as numbers, choices as their ids. */
     record GuessJson(String field, Object value, String unit, Object low, Object high, String why) {}
 
-    static FirstLookJson of(Answer answer, String caution) {
+    static FirstLookJson of(Answer answer, List<String> passedOver, String caution) {
         return new FirstLookJson(
                 direct(answer),
                 glare(answer),
                 new Sky("first", sky(answer, "zenith"), sky(answer, "toward-site")),
                 new Eye(likely(answer, "zenith/eye/limit-natural"), likely(answer, "zenith/eye/limit")),
                 guesses(answer.sentence()),
-                answer.assessment().notes().stream()
-                        .map(Assessment.Note::sentence)
+                Stream.concat(answer.assessment().notes().stream().map(Assessment.Note::sentence), passedOver.stream())
                         .toList(),
                 ZeroPoint.TRADITIONAL.name(),
                 caution);

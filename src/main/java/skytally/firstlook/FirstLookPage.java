@@ -33,6 +33,11 @@ record FirstLookPage(
         LadderPicture ladder,
         List<NumberRow> numbers) {
 
+    /** A share of the flux no larger than this is nothing, by any file or shape. */
+    private static final double WITHIN_THE_DATA_PERCENT = 0.05;
+
+    private static final double LEAST_CD = 1e-6;
+
     /**
      * One answer.
      *
@@ -147,6 +152,14 @@ record FirstLookPage(
             case CANDELA_PER_SQUARE_METRE -> Quantity.luminance(value, 3);
             case MAGNITUDE -> Quantity.magnitude(value, 2);
             case MAGNITUDE_PER_SQUARE_ARCSECOND -> Quantity.skyBrightness(value, 2);
+            case SHARE_PERCENT ->
+                value <= WITHIN_THE_DATA_PERCENT
+                        ? new Quantity(new Written("0 within the data", 0), "")
+                        : new Quantity(QuantityFormat.significant(value, 3), unit.symbol());
+            case CANDELA ->
+                value > 0 && value < LEAST_CD
+                        ? new Quantity(new Written("under 1", -6), unit.symbol())
+                        : new Quantity(QuantityFormat.significant(value, 3), unit.symbol());
             case STARS -> new Quantity(QuantityFormat.significant(value, 2), unit.symbol());
             default -> new Quantity(QuantityFormat.significant(value, 3), unit.symbol());
         };

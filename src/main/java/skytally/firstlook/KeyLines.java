@@ -9,6 +9,7 @@ import skytally.assessment.Assessment.Topic;
 import skytally.assessment.Figure;
 import skytally.assessment.Likeness;
 import skytally.assessment.Range;
+import skytally.atmosphere.Clearness;
 import skytally.firstlook.FirstLookPage.KeyLine;
 import skytally.firstlook.FirstLookPage.RangeText;
 import skytally.notation.QuantityFormat;
@@ -95,7 +96,9 @@ final class KeyLines {
     private String comparison(String measure, String star) {
         Figure figure = figure(measure);
         if (figure.likely() == 0) {
-            return "Light still arrives from the ground and the sky.";
+            return answer.assessment().has(Topic.NO_DIRECT_LIGHT)
+                    ? "Light still arrives from the ground and the sky."
+                    : "";
         }
         Optional<Likeness> found = answer.assessment().likeness(figure);
         if (found.isEmpty()) {
@@ -103,7 +106,11 @@ final class KeyLines {
         }
         Likeness like = found.get();
         if (like.inMoons()) {
-            return "That is " + times(like.times()) + " " + like.natural() + "; no star is compared, as noted below.";
+            String moons = like.times() >= 0.1
+                    ? times(like.times())
+                    : "about 1 part in "
+                            + QuantityFormat.significant(1 / like.times(), 2).plain() + " of";
+            return "That is " + moons + " " + like.natural() + "; no star is compared, as noted below.";
         }
         String besides = like.times() < 1.15
                 ? "About as much as " + like.natural()
@@ -123,13 +130,13 @@ final class KeyLines {
     private KeyLine veil() {
         double skies = likely("beside/glare/natural-skies");
         double halo = likely("beside/glare/halo");
-        String angle = QuantityFormat.asTyped(answer.sentence().number(Blank.GLARE_ANGLE))
-                        .plain() + "°";
+        String angle = angle();
         Optional<Range> brightness = figure("beside/glare/veil-brightness").range();
         List<String> says = new ArrayList<>();
         if (brightness.isPresent()) {
-            says.add("That is " + QuantityFormat.significant(skies, 2).plain()
-                    + " of a natural sky of 22.0, laid inside your eye over the sky already there; a hand held before"
+            String howMany = QuantityFormat.significant(skies, 2).plain()
+                    + (skies >= 1.5 ? " natural skies of 22.0" : " of a natural sky of 22.0");
+            says.add("That is " + howMany + ", laid inside your eye over the sky already there; a hand held before"
                     + " the lamps removes it.");
         }
         if (halo > 0) {
@@ -168,7 +175,25 @@ final class KeyLines {
                 range("zenith/sky/increase", KeyLines::percent),
                 List.of(
                         toward,
-                        "Of a fixed natural sky of 22.0. Over the sky as it is tonight: not known, without a reading."));
+                        otherAirs(),
+                        "Of a fixed natural sky of 22.0 mag/arcsec² (a larger number is a darker sky). At solar maximum"
+                                + " nature is up to 0.4 mag brighter, and the same light a smaller share of it. Over the"
+                                + " sky as it is tonight: not known, without a reading."));
+    }
+
+    /** A far result is never given in one air alone. */
+    private String otherAirs() {
+        if (answer.airs().isEmpty()) {
+            return "";
+        }
+        List<String> each = new ArrayList<>();
+        for (Clearness air : Clearness.values()) {
+            Figure there = answer.airs().get(air);
+            if (there != null) {
+                each.add("in " + air.words() + " air " + percent(there.likely()));
+            }
+        }
+        return "So far away the haze decides. Overhead, " + String.join(", ", each) + ".";
     }
 
     private KeyLine faintestStar() {
@@ -191,17 +216,30 @@ final class KeyLines {
                                 0),
                         "")),
                 range("zenith/eye/limit", value -> Quantity.magnitude(value, 2)),
-                List.of("To a typical eye; keen eyes see 0.4 fainter, others 0.2 less. " + stars));
+                List.of("To a typical eye; keen eyes see 0.4 fainter, others 0.2 less. " + stars, withLampsInView()));
+    }
+
+    private String withLampsInView() {
+        return likely("direct/illuminance") > 0
+                ? "With the lights in view, " + angle() + " beside them: "
+                        + QuantityFormat.decimals(likely("beside/eye/limit-in-view"), 2)
+                                .digits() + "."
+                : "";
+    }
+
+    private String angle() {
+        return QuantityFormat.asTyped(answer.sentence().number(Blank.GLARE_ANGLE))
+                        .plain() + "°";
     }
 
     private static String starsLost(double before, double after) {
         double lost = before - after;
         String some = "about " + QuantityFormat.significant(before, 2).plain() + " stars above the horizon";
-        return lost < 0.5
-                ? "None of " + some + " is lost by that."
+        return lost < 1.5
+                ? "Of " + some + " none is lost that could be counted."
                 : "Of " + some + ", about "
                         + QuantityFormat.significant(Math.rint(lost), lost < 10 ? 1 : 2)
-                                .plain() + (lost < 1.5 ? " is" : " are") + " lost.";
+                                .plain() + " are lost.";
     }
 
     /** Below a hundredth of a percent the digits say nothing. */
@@ -246,6 +284,7 @@ final class KeyLines {
                     Quantity high = written.apply(range.high());
                     return new RangeText(low.number(), high.number(), high.unit());
                 })
+                .filter(range -> !range.low().equals(range.high()))
                 .orElse(null);
     }
 }

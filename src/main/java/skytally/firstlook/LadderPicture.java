@@ -5,6 +5,7 @@ import java.util.Comparator;
 import java.util.LinkedHashSet;
 import java.util.List;
 import java.util.Set;
+import skytally.assessment.Assessment.Topic;
 import skytally.charts.Ladder;
 import skytally.notation.QuantityFormat;
 import skytally.photometry.Illuminance;
@@ -35,6 +36,7 @@ record LadderPicture(String svg, String says, List<Row> rows, List<Source> sourc
     record Source(String letter, String reference, String standing) {}
 
     private static final ZeroPoint ZERO_POINT = ZeroPoint.TRADITIONAL;
+    private static final double FAINTEST_SHOWN_LX = 1e-10;
 
     static LadderPicture of(Answer answer, Units units) {
         List<Ladder.Rung> rungs = Ladder.naturalRungs(ZERO_POINT);
@@ -67,20 +69,26 @@ record LadderPicture(String svg, String says, List<Row> rows, List<Source> sourc
         answer.figure("direct/illuminance").range().ifPresent(range -> {
             if (range.likely() > 0) {
                 marks.add(new Ladder.Mark(
-                        all, range.likely(), range.low(), range.high(), withMagnitude(range.likely()), false));
+                        all, range.likely(), range.low(), range.high(), light(answer, range.likely()), false));
             }
         });
         double other = answer.otherFigure("direct/illuminance").likely();
-        if (other > 0) {
+        if (isWorthAMark(answer, other)) {
             double now = answer.figure("direct/illuminance").likely();
             Ladder.Line says = now > 0
                     ? new Ladder.Line(
                             QuantityFormat.significant(other, 2),
                             " lx, " + QuantityFormat.significant(other / now, 2).plain() + " times as much")
-                    : withMagnitude(other);
+                    : light(answer, other);
             marks.add(new Ladder.Mark(otherName(answer), other, other, other, says, true));
         }
         return marks;
+    }
+
+    /** Not when it is next to nothing, nor when it would lie on the other mark. */
+    private static boolean isWorthAMark(Answer answer, double other) {
+        double now = answer.figure("direct/illuminance").likely();
+        return other > FAINTEST_SHOWN_LX && (now == 0 || Math.abs(other / now - 1) > 0.02);
     }
 
     private static String otherName(Answer answer) {
@@ -92,8 +100,11 @@ record LadderPicture(String svg, String says, List<Row> rows, List<Source> sourc
                         + (usual == 0 ? "° toward you" : "° further up");
     }
 
-    private static Ladder.Line withMagnitude(double lux) {
-        return new Ladder.Line(QuantityFormat.significant(lux, 2), " lx, magnitude " + magnitude(lux));
+    /** With its magnitude, where it may be compared with stars. */
+    private static Ladder.Line light(Answer answer, double lux) {
+        boolean star = !answer.assessment().has(Topic.NOT_A_POINT)
+                && !answer.assessment().has(Topic.BRIGHTER_THAN_MOON);
+        return new Ladder.Line(QuantityFormat.significant(lux, 2), star ? " lx, magnitude " + magnitude(lux) : " lx");
     }
 
     private static Row row(String name, double lux, Units units, String source, boolean proposed) {

@@ -14,12 +14,23 @@ import skytally.web.Switches.Units;
 record Quantity(Written number, String unit) {
 
     private static final double METRES_PER_FOOT = 0.3048;
+    private static final double METRES_PER_MILE = 1609.344;
+    private static final double FAR_M = 10_000;
+
+    /** Less light than any eye or meter tells from none. */
+    private static final double LEAST_LX = 1e-12;
 
     static Quantity lux(double lux, int figures) {
+        if (lux > 0 && lux < LEAST_LX) {
+            return new Quantity(new Written("under 1", -12), "lx");
+        }
         return new Quantity(QuantityFormat.significant(lux, figures), "lx");
     }
 
     static Quantity footcandles(double lux, int figures) {
+        if (lux > 0 && lux < LEAST_LX) {
+            return new Quantity(new Written("under 1", -13), "fc");
+        }
         return new Quantity(QuantityFormat.significant(new Illuminance(lux).footcandles(), figures), "fc");
     }
 
@@ -35,6 +46,10 @@ record Quantity(Written number, String unit) {
 
     static Quantity length(double metres, int figures, Units units) {
         boolean feet = units == Units.US;
+        if (metres >= FAR_M) {
+            double far = feet ? metres / METRES_PER_MILE : metres / 1000;
+            return new Quantity(QuantityFormat.atMost(far, figures), feet ? "miles" : "km");
+        }
         double value = feet ? metres / METRES_PER_FOOT : metres;
         // whole metres are not rounded away: 1 234 m stays 1 234 m
         Written written =

@@ -1,6 +1,7 @@
 package skytally.firstlook;
 
 import java.util.ArrayList;
+import java.util.Arrays;
 import java.util.EnumMap;
 import java.util.LinkedHashMap;
 import java.util.List;
@@ -9,6 +10,7 @@ import java.util.Optional;
 import org.jspecify.annotations.Nullable;
 import org.springframework.util.MultiValueMap;
 import skytally.atmosphere.Clearness;
+import skytally.luminaire.Shape;
 import skytally.luminaire.Shapes;
 import skytally.notation.NumberReader;
 import skytally.notation.QuantityFormat;
@@ -22,10 +24,19 @@ import skytally.web.Switches;
  * @param fields by the blank's name in addresses
  * @param faults everything wrong, each with the id of its field
  * @param tilted whether the lights hang in another way than described
+ * @param guessed  names of the blanks whose guesses stand in the form
+ * @param tiltTo   the tilt of the button that hangs the lights another way
+ * @param upright  whether the fitting stands upright by its nature
  * @param switches the switches that stand in the address and must stay in it
  */
 record SentenceForm(
-        Map<String, Field> fields, List<InvalidInputException.Fault> faults, boolean tilted, List<Option> switches) {
+        Map<String, Field> fields,
+        List<InvalidInputException.Fault> faults,
+        boolean tilted,
+        List<String> guessed,
+        String tiltTo,
+        boolean upright,
+        List<Option> switches) {
 
     /**
      * One blank.
@@ -71,6 +82,12 @@ record SentenceForm(
                                 new InvalidInputException.Fault(fault.blank().field(), fault.message()))
                         .toList(),
                 sent.containsKey(Blank.TILT.field()),
+                Arrays.stream(Blank.values())
+                        .filter(blank -> SentenceAddress.isAskedFor(blank) && !sent.containsKey(blank.field()))
+                        .map(Blank::field)
+                        .toList(),
+                carelessTilt(usualTiltDeg(sent)),
+                usualTiltDeg(sent) > 0,
                 switches);
     }
 
@@ -98,7 +115,7 @@ record SentenceForm(
                 value,
                 guess,
                 fault,
-                options(blank, value));
+                options(blank, value, usualTiltDeg(sent)));
     }
 
     /** A number as it stands in its field: what cannot be used is left as it was typed. */
@@ -126,7 +143,7 @@ record SentenceForm(
         };
     }
 
-    private static List<Option> options(Blank blank, String value) {
+    private static List<Option> options(Blank blank, String value, double usualTiltDeg) {
         List<Option> options = new ArrayList<>();
         switch (blank) {
             case SPECTRAL_CLASS ->
@@ -140,13 +157,7 @@ record SentenceForm(
                     options.add(new Option(air.id(), air.words()));
                 }
             }
-            case TILT -> {
-                options.add(new Option("", "everything as described"));
-                if (!value.isEmpty() && !value.equals("15")) {
-                    options.add(new Option(value, "tilted " + value + "° toward me"));
-                }
-                options.add(new Option("15", "tilted 15° toward me"));
-            }
+            case TILT -> options.addAll(tiltOptions(value, usualTiltDeg));
             default -> {
                 return List.of();
             }
@@ -156,5 +167,33 @@ record SentenceForm(
             options.add(0, new Option(value, "“" + value + "”"));
         }
         return options;
+    }
+
+    /** As described, tilted carelessly, and whatever else stands in the address. */
+    private static List<Option> tiltOptions(String value, double usualTiltDeg) {
+        String careless = carelessTilt(usualTiltDeg);
+        List<Option> options = new ArrayList<>();
+        options.add(new Option("", "everything as described"));
+        options.add(new Option(
+                careless, usualTiltDeg == 0 ? "tilted " + careless + "° toward me" : "tipped 15° further up"));
+        if (!value.isEmpty() && !value.equals(careless)) {
+            options.add(new Option(
+                    value,
+                    usualTiltDeg == 0
+                            ? "tilted " + value + "° toward me"
+                            : "turned " + value + "° up from straight down"));
+        }
+        return options;
+    }
+
+    private static String carelessTilt(double usualTiltDeg) {
+        return Answers.plain(usualTiltDeg + Answers.CARELESS_TILT_DEG);
+    }
+
+    private static double usualTiltDeg(MultiValueMap<String, String> sent) {
+        String shape = sent.getFirst(Blank.SHAPE.field());
+        return Shapes.byId(shape == null ? Guesses.of(Blank.SHAPE).likely() : shape)
+                .map(Shape::usualTiltDeg)
+                .orElse(0.0);
     }
 }

@@ -87,7 +87,7 @@ final class SentenceScene implements OpenScene {
                 "lights",
                 s.count(),
                 new Position(0, 0, s.mountingHeightM()),
-                new Attitude(0, s.tiltDeg(), 0),
+                new Attitude(shape.facesUp() ? 180 : 0, s.tiltDeg(), 0), // leans its light toward the eye
                 new LuminousFlux(s.lumens()),
                 shape.distribution(),
                 s.spectralClass().spectrum(),
@@ -115,10 +115,17 @@ final class SentenceScene implements OpenScene {
                         new Look(Look.TOWARD_SITE, Look.Purpose.SKY, Direction.toward(Math.PI, TOWARD_SITE_ALTITUDE))));
     }
 
-    /** The direction to the lights turned by an angle, level to the right of them. */
+    /**
+     * A direction at an angle to the right of the lights: level beside them, and where they stand below the eye's
+     * level, along that level, so that it does not run into the ground.
+     */
     private static Direction beside(double altitudeRad, double angleRad) {
         double near = StrictMath.cos(angleRad);
-        return Direction.of(
-                -StrictMath.sin(angleRad), -near * StrictMath.cos(altitudeRad), near * StrictMath.sin(altitudeRad));
+        double level = StrictMath.cos(altitudeRad);
+        if (altitudeRad < 0 && near < level) {
+            double turn = StrictMath.acos(near / level);
+            return Direction.of(-StrictMath.sin(turn), -StrictMath.cos(turn), 0);
+        }
+        return Direction.of(-StrictMath.sin(angleRad), -near * level, near * StrictMath.sin(altitudeRad));
     }
 }

@@ -11,6 +11,9 @@ import skytally.notation.QuantityFormat;
  */
 record Beam(double exponent) implements IntensityDistribution {
 
+    /** Share of the peak that is no light: no number of lamps makes it seen, and its magnitude would not be finite. */
+    private static final double DARK = 1e-30;
+
     Beam {
         if (!(exponent >= 1 && exponent < Double.POSITIVE_INFINITY)) {
             throw new IllegalArgumentException("A beam's exponent must be finite and 1 or more, not " + exponent);
@@ -36,7 +39,7 @@ record Beam(double exponent) implements IntensityDistribution {
             return 0;
         }
         double fall = exponent == 1 ? -z : Math.pow(-z, exponent);
-        return (exponent + 1) / (2 * Math.PI) * fall;
+        return fall < DARK ? 0 : (exponent + 1) / (2 * Math.PI) * fall;
     }
 
     @Override

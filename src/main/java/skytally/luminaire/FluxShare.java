@@ -43,7 +43,7 @@ public final class FluxShare {
     /** Share between the level and 10° above it, as the luminaire hangs; 0 to 1. */
     public static double low(IntensityDistribution light, Attitude attitude) {
         FluxShare share = new FluxShare(light, attitude);
-        return share.above(0) - share.above(LOW_RAD);
+        return Math.max(0, share.above(0) - share.above(LOW_RAD));
     }
 
     /** Share above an altitude of −90° to 90° (in radians); over −90° it is all of it, 1. */
@@ -60,7 +60,7 @@ public final class FluxShare {
         for (int i = 1; i < cuts.length; i++) {
             sum += piece(cuts[i - 1], cuts[i], StrictMath.sin(altitudeRad));
         }
-        return sum;
+        return Math.min(1, sum); // the sum may be a rounding over, and what is left of one would be less than nothing
     }
 
     private double[] cuts(double altitudeRad) {

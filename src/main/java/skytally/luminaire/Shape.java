@@ -26,6 +26,11 @@ public record Shape(
         return distanceM >= nearestM();
     }
 
+    /** Whether it is turned over already, so that raising its street side leans its light the other way. */
+    public boolean facesUp() {
+        return distribution instanceof TurnedUp;
+    }
+
     /** The distance from which the inverse-square law holds for this shape. */
     public double nearestM() {
         return (narrowestBeamDeg < 10 ? 10 : 5) * luminousSizeM;

@@ -40,7 +40,7 @@ public final class NumberReader {
         if (typed.length() > LONGEST) {
             return new Unreadable("is longer than " + LONGEST + " characters");
         }
-        String text = typed.strip().replaceAll("[\\u00a0\\u2009\\u202f]", " ").replace('−', '-');
+        String text = typed.replaceAll("[\\u00a0\\u2009\\u202f]", " ").strip().replace('−', '-');
         if (PLAIN.matcher(text).matches()) {
             return new Number(new BigDecimal(text));
         }

@@ -33,8 +33,8 @@ import skytally.spectrum.SpectralClasses;
 @State(Scope.Benchmark)
 @BenchmarkMode(Mode.AverageTime)
 @OutputTimeUnit(TimeUnit.NANOSECONDS)
-@Warmup(iterations = 4, time = 1)
-@Measurement(iterations = 5, time = 1)
+@Warmup(iterations = 6, time = 300, timeUnit = TimeUnit.MILLISECONDS)
+@Measurement(iterations = 15, time = 300, timeUnit = TimeUnit.MILLISECONDS)
 @Fork(2)
 public class DirectLightBenchmark {
 

@@ -42,8 +42,10 @@ class ExponentialLayerTest {
             for (double to : new double[] {0, 100, 3000, 20_000, 80_000}) {
                 for (double ground : new double[] {1, 1000, 20_000, 100_000, 300_000}) {
                     Chord chord = Chord.between(from, to, ground);
-                    if (chord.lowestM() < -1) {
-                        continue; // through the ground
+                    boolean throughTheGround = chord.lowestM() < -1;
+                    boolean farFromTheUpperEnd = from > to && ground > 100_000;
+                    if (throughTheGround || farFromTheUpperEnd) {
+                        continue;
                     }
                     double summed = chord.summed(scaleHeightM);
                     assertThat(chord.closed(scaleHeightM))

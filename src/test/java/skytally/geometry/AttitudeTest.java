@@ -43,11 +43,32 @@ class AttitudeTest {
                 .isCloseTo(Math.sin(Math.toRadians(10)), within(1e-12));
     }
 
+    /** There and back, over a grid of attitudes and directions; a turn keeps lengths and angles. */
     @Test
     void turningBackUndoesTheTurn() {
-        Rotation hang = new Attitude(213, 38, -17).rotation();
+        Direction first = Direction.of(0.3, -0.5, 0.8);
+        Direction second = Direction.of(-0.9, 0.1, 0.2);
+        for (double bearing = -360; bearing <= 360; bearing += 45) {
+            for (double tilt = 0; tilt <= 180; tilt += 22.5) {
+                for (double roll = -180; roll <= 180; roll += 30) {
+                    Rotation hang = new Attitude(bearing, tilt, roll).rotation();
+                    assertThat(hang.turnBack(hang.turn(first)).angleTo(first)).isCloseTo(0, within(1e-14));
+                    assertThat(hang.turn(hang.turnBack(second)).angleTo(second)).isCloseTo(0, within(1e-14));
+                    assertThat(hang.turn(first).angleTo(hang.turn(second)))
+                            .isCloseTo(first.angleTo(second), within(1e-14));
+                }
+            }
+        }
+    }
+
+    @Test
+    void aFullTurnOfTheBearingChangesNothing() {
         Direction any = Direction.of(0.3, -0.5, 0.8);
-        assertThat(hang.turnBack(hang.turn(any)).angleTo(any)).isCloseTo(0, within(1e-9));
+        assertThat(new Attitude(-90, 40, 10)
+                        .rotation()
+                        .turn(any)
+                        .angleTo(new Attitude(270, 40, 10).rotation().turn(any)))
+                .isCloseTo(0, within(1e-14));
     }
 
     @Test

@@ -38,7 +38,10 @@ class FluxShareTest {
             double up = FluxShare.upward(shape.distribution(), attitude);
             Attitude over = new Attitude(attitude.bearingDeg(), 180 - attitude.tiltDeg(), -attitude.rollDeg());
             assertThat(all).as("all of it, hung %s", attitude).isCloseTo(1, within(1e-9));
-            assertThat(up).as("up, hung %s", attitude).isBetween(-1e-12, 1 + 1e-9);
+            assertThat(up).as("up, hung %s", attitude).isBetween(0.0, 1.0);
+            assertThat(FluxShare.low(shape.distribution(), attitude))
+                    .as("low, hung %s", attitude)
+                    .isBetween(0.0, 1.0);
             if (shape.distribution().isRound() && attitude.rollDeg() == 0) {
                 assertThat(up + FluxShare.upward(shape.distribution(), over)).isCloseTo(1, within(1e-9));
             }

@@ -4,6 +4,8 @@ import static org.assertj.core.api.Assertions.assertThat;
 import static org.junit.jupiter.api.Assumptions.assumeTrue;
 
 import java.io.IOException;
+import java.net.InetAddress;
+import java.net.ServerSocket;
 import java.nio.file.Files;
 import java.nio.file.Path;
 import java.nio.file.attribute.PosixFilePermissions;
@@ -53,6 +55,16 @@ class StartTest {
             assertThat(Run.of(data).awaitRefusal())
                     .contains("Another copy of Skytally is already using the data directory " + held.path())
                     .contains("stop it, or start this one with another skytally.data-directory");
+        }
+    }
+
+    @Test
+    void saysInOneLineThatThePortIsTaken() throws Exception {
+        try (ServerSocket taken = new ServerSocket(0, 1, InetAddress.getLoopbackAddress())) {
+            assertThat(Run.of(temporary.resolve("data"), "--server.port=" + taken.getLocalPort())
+                            .awaitRefusal())
+                    .contains("Port " + taken.getLocalPort() + " is in use by another program")
+                    .contains("--server.port=");
         }
     }
 
@@ -172,9 +184,11 @@ class StartTest {
                     "-cp",
                     System.getProperty("java.class.path"),
                     "skytally.SkytallyApplication",
-                    "--skytally.data-directory=" + data,
-                    "--server.port=0"));
+                    "--skytally.data-directory=" + data));
             command.addAll(List.of(more));
+            if (command.stream().noneMatch(word -> word.startsWith("--server.port="))) {
+                command.add("--server.port=0");
+            }
             Process process = new ProcessBuilder(command)
                     .redirectErrorStream(true)
                     .redirectOutput(says.toFile())

@@ -12,4 +12,4 @@ import org.springframework.boot.test.context.SpringBootTest;
 @SpringBootTest(
         webEnvironment = SpringBootTest.WebEnvironment.RANDOM_PORT,
         properties = {"test-pages=true", "skytally.web.host-names=Lights.example"})
-@interface ServerTest {}
+public @interface ServerTest {}

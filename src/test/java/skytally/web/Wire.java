@@ -14,7 +14,7 @@ import java.util.Map;
  * Requests written byte by byte, because HTTP clients will not send what these tests are about: a false Host, a
  * browser's own headers, a request that is none.
  */
-final class Wire {
+public final class Wire {
 
     private static final String END = "\r\n";
 
@@ -30,36 +30,36 @@ final class Wire {
         header("Connection", "close");
     }
 
-    static Wire get(int port, String path) {
+    public static Wire get(int port, String path) {
         return new Wire(port, "GET " + path + " HTTP/1.1");
     }
 
-    static Wire post(int port, String path, String form) {
+    public static Wire post(int port, String path, String form) {
         Wire wire = new Wire(port, "POST " + path + " HTTP/1.1");
         wire.header("Content-Type", "application/x-www-form-urlencoded");
         return wire.body(form);
     }
 
-    static Wire of(int port, String method, String path) {
+    public static Wire of(int port, String method, String path) {
         return new Wire(port, method + " " + path + " HTTP/1.1");
     }
 
-    Wire header(String name, String value) {
+    public Wire header(String name, String value) {
         headers.put(name, value);
         return this;
     }
 
-    Wire without(String name) {
+    public Wire without(String name) {
         headers.remove(name);
         return this;
     }
 
-    Wire body(String text) {
+    public Wire body(String text) {
         body = text.getBytes(StandardCharsets.UTF_8);
         return header("Content-Length", String.valueOf(body.length));
     }
 
-    Answer send() throws IOException {
+    public Answer send() throws IOException {
         StringBuilder head = new StringBuilder(firstLine).append(END);
         headers.forEach(
                 (name, value) -> head.append(name).append(": ").append(value).append(END));
@@ -73,7 +73,7 @@ final class Wire {
     }
 
     /** What came back. */
-    record Answer(int status, Map<String, List<String>> headers, String body) {
+    public record Answer(int status, Map<String, List<String>> headers, String body) {
 
         private static Answer read(byte[] all) {
             // One char a byte, until the length of each chunk has been counted.
@@ -113,7 +113,7 @@ final class Wire {
         }
 
         /** The only header of that name, or a failure. */
-        String header(String name) {
+        public String header(String name) {
             List<String> values = headers.getOrDefault(name.toLowerCase(Locale.ROOT), List.of());
             if (values.size() != 1) {
                 throw new AssertionError("Expected one header " + name + " but there were " + values);
@@ -121,7 +121,7 @@ final class Wire {
             return values.get(0);
         }
 
-        List<String> cookies() {
+        public List<String> cookies() {
             return headers.getOrDefault("set-cookie", List.of());
         }
     }
