@@ -44,6 +44,8 @@ class FirstLookController {
         ModelAndView page = new ModelAndView("firstlook/page");
         page.addObject("form", SentenceForm.of(sent, read, switches.units()));
         read.sentence()
+                .ifPresent(sentence -> page.addObject("keep", KeepForm.of(sentence, SentenceProject.title(sentence))));
+        read.sentence()
                 .map(answers::to)
                 .ifPresentOrElse(
                         answer -> page.addObject("answer", FirstLookPage.of(answer, switches.units())),
