@@ -53,7 +53,7 @@ class ArchitectureTest {
             storage    :
             web        :
             project    : spectrum luminaire atmosphere scene web
-            firstlook  : spectrum luminaire atmosphere scene assessment charts web
+            firstlook  : spectrum luminaire atmosphere scene assessment charts web project
             """);
 
     /** Beside the JDK, the core may use these and no others. */

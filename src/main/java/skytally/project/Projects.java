@@ -5,12 +5,10 @@ import java.time.Clock;
 import java.time.Instant;
 import java.time.temporal.ChronoUnit;
 import java.util.ArrayList;
-import java.util.HashSet;
 import java.util.LinkedHashMap;
 import java.util.List;
 import java.util.Map;
 import java.util.Optional;
-import java.util.Set;
 import java.util.UUID;
 import org.springframework.stereotype.Component;
 import org.springframework.transaction.annotation.Transactional;
@@ -25,7 +23,8 @@ public class Projects {
     /** A line of the list of projects. */
     public record Listed(UUID id, String title, Instant changedAt) {}
 
-    private static final int LONGEST_TITLE = 400;
+    /** Characters of a title. */
+    public static final int LONGEST_TITLE = 400;
 
     private final ProjectRows rows;
     private final ChangeRows changes;
@@ -48,6 +47,25 @@ public class Projects {
     @Transactional(readOnly = true)
     public Optional<KeptProject> find(UUID id) {
         return rows.findById(id).map(Projects::kept);
+    }
+
+    /**
+     * The project at an address.
+     *
+     * @param id as written in the address
+     * @throws NoSuchProjectException if it is no id, or none is kept under it
+     */
+    @Transactional(readOnly = true)
+    public KeptProject require(String id) {
+        try {
+            UUID uuid = UUID.fromString(id);
+            if (uuid.toString().equals(id)) {
+                return rows.findById(uuid).map(Projects::kept).orElseThrow(NoSuchProjectException::new);
+            }
+        } catch (IllegalArgumentException notOne) {
+            // the same to whoever asked: there is no such page
+        }
+        throw new NoSuchProjectException();
     }
 
     /**
@@ -98,6 +116,12 @@ public class Projects {
         return bySteps.values().stream().map(Projects::step).toList();
     }
 
+    /** How many saves there were of a project. */
+    @Transactional(readOnly = true)
+    public long countSteps(UUID id) {
+        return changes.lastStep(id).orElse(0L);
+    }
+
     /**
      * Takes back the last save that has not been taken back yet; again takes back the one before. The taking back is a
      * save of its own, so nothing is forgotten. The first save, which made the project, stays.
@@ -111,7 +135,7 @@ public class Projects {
         if (row.version() != openedAt) {
             throw new ProjectClashException();
         }
-        Optional<Step> last = lastStanding(history(id));
+        Optional<Step> last = Step.lastStanding(history(id));
         if (last.isEmpty()) {
             return Optional.empty();
         }
@@ -126,24 +150,18 @@ public class Projects {
         }
     }
 
-    private static Optional<Step> lastStanding(List<Step> history) {
-        Set<Long> gone = new HashSet<>();
-        for (int i = history.size() - 1; i > 0; i--) {
-            Step step = history.get(i);
-            Long undoes = step.undoes();
-            if (undoes != null) {
-                gone.add(undoes);
-            } else if (!gone.contains(step.number())) {
-                return Optional.of(step);
-            }
-        }
-        return Optional.empty();
-    }
-
-    /** Lets go of a project and its whole history. */
+    /**
+     * Lets go of a project and its whole history.
+     *
+     * @throws ProjectClashException if it has been saved since it was opened
+     */
     @Transactional
-    public void delete(UUID id) {
-        rows.deleteById(id);
+    public void delete(UUID id, long openedAt) {
+        ProjectRow row = rows.findById(id).orElseThrow(ProjectClashException::new);
+        if (row.version() != openedAt) {
+            throw new ProjectClashException();
+        }
+        rows.delete(row);
     }
 
     private void record(UUID id, List<Difference.Change> made, Saving saving) {

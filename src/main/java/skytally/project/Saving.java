@@ -11,7 +11,9 @@ import org.jspecify.annotations.Nullable;
  */
 public record Saving(String who, String why, @Nullable Long undoes) {
 
-    private static final int LONGEST_WHO = 200;
+    /** Characters of a name. */
+    public static final int LONGEST_WHO = 200;
+
     private static final int LONGEST_WHY = 1000;
 
     public Saving {

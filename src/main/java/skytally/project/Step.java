@@ -1,7 +1,10 @@
 package skytally.project;
 
 import java.time.Instant;
+import java.util.HashSet;
 import java.util.List;
+import java.util.Optional;
+import java.util.Set;
 import org.jspecify.annotations.Nullable;
 import skytally.project.transfer.Difference;
 
@@ -21,4 +24,25 @@ public record Step(
         String who,
         String why,
         @Nullable Long undoes,
-        List<Difference.Change> changes) {}
+        List<Difference.Change> changes) {
+
+    /**
+     * The step an undo takes back next: the last that neither takes another back nor was taken back itself. The first,
+     * which made the project, stays.
+     *
+     * @param history the first step first
+     */
+    public static Optional<Step> lastStanding(List<Step> history) {
+        Set<Long> gone = new HashSet<>();
+        for (int i = history.size() - 1; i > 0; i--) {
+            Step step = history.get(i);
+            Long undoes = step.undoes();
+            if (undoes != null) {
+                gone.add(undoes);
+            } else if (!gone.contains(step.number())) {
+                return Optional.of(step);
+            }
+        }
+        return Optional.empty();
+    }
+}

@@ -101,7 +101,7 @@ class ProjectsTest {
     @Test
     void areForgottenWithTheirHistoryWhenDeleted() {
         KeptProject kept = projects.add(fresh("Gone"), Saving.by("", ""));
-        projects.delete(kept.project().id());
+        projects.delete(kept.project().id(), kept.version());
         assertThat(projects.find(kept.project().id())).isEmpty();
         assertThat(projects.history(kept.project().id())).isEmpty();
     }

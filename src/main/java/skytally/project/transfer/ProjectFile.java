@@ -218,7 +218,7 @@ public final class ProjectFile {
         return new Values(object.byName(ProjectFile::stated));
     }
 
-    private static Stated stated(FileObject object) throws ProjectFileException {
+    static Stated stated(FileObject object) throws ProjectFileException {
         List<Claim> claims = object.list("claims", ProjectFile::claim);
         return new Stated(claims, object.wholeOr("used", 0));
     }
