@@ -55,4 +55,29 @@ public record Project(
                 .filter(document -> document.mark().equals(mark))
                 .findFirst();
     }
+
+    public Project withDocuments(List<Document> others) {
+        return new Project(id, title, others, site, schemes, places);
+    }
+
+    public Project withSite(Values other) {
+        return new Project(id, title, documents, other, schemes, places);
+    }
+
+    public Project withPlaces(List<Place> others) {
+        return new Project(id, title, documents, site, schemes, others);
+    }
+
+    /** The same with the scheme of that mark replaced. */
+    public Project withScheme(Scheme other) {
+        return new Project(
+                id,
+                title,
+                documents,
+                site,
+                schemes.stream()
+                        .map(scheme -> scheme.mark().equals(other.mark()) ? other : scheme)
+                        .toList(),
+                places);
+    }
 }

@@ -59,4 +59,22 @@ public record Scheme(String mark, Kind kind, String name, List<LuminaireType> ty
     public Optional<LuminaireType> type(String typeMark) {
         return types.stream().filter(type -> type.mark().equals(typeMark)).findFirst();
     }
+
+    /** The same scheme with another schedule and plan. */
+    public Scheme with(List<LuminaireType> otherTypes, List<Placement> otherPlacements) {
+        return new Scheme(mark, kind, name, otherTypes, otherPlacements);
+    }
+
+    public Optional<Placement> placement(String lightMark) {
+        return placements.stream()
+                .filter(placement -> placement.mark().equals(lightMark))
+                .findFirst();
+    }
+
+    /** The lights of one type, in the order of the plan. */
+    public List<Placement> placementsOf(String typeMark) {
+        return placements.stream()
+                .filter(placement -> placement.type().equals(typeMark))
+                .toList();
+    }
 }
