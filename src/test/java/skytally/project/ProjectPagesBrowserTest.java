@@ -2,6 +2,7 @@ package skytally.project;
 
 import static org.assertj.core.api.Assertions.assertThat;
 
+import java.util.List;
 import java.util.UUID;
 import org.junit.jupiter.api.DisplayName;
 import org.junit.jupiter.api.Test;
@@ -143,7 +144,7 @@ class ProjectPagesBrowserTest {
         };
         try (Browser browser = Browser.on(port)) {
             for (String[] page : all) {
-                for (Switches.Theme theme : Switches.Theme.values()) {
+                for (Switches.Theme theme : themes(page[0])) {
                     for (int width : new int[] {Browser.WIDE, Browser.NARROW}) {
                         browser.width(width);
                         browser.open(at + page[1] + (page[1].contains("?") ? "&" : "?") + "theme=" + theme.word());
@@ -165,6 +166,13 @@ class ProjectPagesBrowserTest {
         }
     }
 
+    /** Each component is on one of four pages, which are looked at in every theme; the others by day. */
+    private static List<Switches.Theme> themes(String page) {
+        return List.of("lights", "type", "ring", "place").contains(page)
+                ? List.of(Switches.Theme.values())
+                : List.of(Switches.Theme.DAY);
+    }
+
     @Test
     void sayWhatIsWrongAndThatAnotherSavedFirst() {
         KeptProject kept = projects.add(Project.named(UUID.randomUUID(), "Two at once"), Saving.by("", ""));
@@ -184,7 +192,7 @@ class ProjectPagesBrowserTest {
 
                 KeptProject now = projects.find(kept.project().id()).orElseThrow();
                 projects.save(
-                        now.project().withDocuments(java.util.List.of(new Document("D" + width, "First", "", "", ""))),
+                        now.project().withDocuments(List.of(new Document("D" + width, "First", "", "", ""))),
                         now.version(),
                         Saving.by("", ""));
                 field(browser, "latitude").sendKeys(Keys.ENTER);

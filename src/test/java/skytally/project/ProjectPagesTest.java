@@ -243,6 +243,12 @@ class ProjectPagesTest {
                 "save",
                 "why",
                 "seen " + NASTY,
+                "party",
+                "objector",
+                "eyeHeight",
+                "",
+                "eyeHeight-unit",
+                "ft",
                 "what",
                 "kitchen",
                 "what-used",
@@ -256,7 +262,8 @@ class ProjectPagesTest {
                 .contains("It was changed in the meantime", "kitchen", "What it is", "seen &lt;script");
         assertThat(clash.body())
                 .contains("href=\"" + page + "\"")
-                .doesNotContain("<script", "what-used", "name=\"_csrf\"");
+                .contains("an objector&#39;s")
+                .doesNotContain("<script", "what-used", "name=\"_csrf\"", "Height of the eye");
         assertThat(project()).isEqualTo(first);
     }
 

@@ -17,6 +17,7 @@ import org.springframework.web.server.ResponseStatusException;
 import org.springframework.web.servlet.ModelAndView;
 import skytally.project.Field;
 import skytally.project.Fields;
+import skytally.project.Party;
 import skytally.project.ProjectClashException;
 
 /** When somebody saved the same project first: nothing is saved, and what was typed is shown to be copied. */
@@ -24,6 +25,7 @@ import skytally.project.ProjectClashException;
 class ClashPages {
 
     private static final String PATH = "/projects/clash";
+    private static final String UNIT = "-unit";
 
     /** What a form sends beside what was typed. */
     private static final Set<String> NOT_TYPED = Set.of("_csrf", "version", "doing");
@@ -62,13 +64,23 @@ class ClashPages {
     private List<TypedLine> typed(Map<String, String[]> sent) {
         List<TypedLine> lines = new ArrayList<>();
         sent.forEach((name, values) -> {
-            if (!NOT_TYPED.contains(name) && !name.endsWith("-used")) {
+            if (!NOT_TYPED.contains(name) && !name.endsWith("-used") && !isUnitOfNothing(name, sent)) {
                 Arrays.stream(values)
                         .filter(value -> !value.isBlank())
-                        .forEach(value -> lines.add(new TypedLine(label(name), value)));
+                        .forEach(value -> lines.add(new TypedLine(label(name), inWords(name, value))));
             }
         });
         return lines;
+    }
+
+    /** A unit is always sent; beside an empty box nobody chose it. */
+    private static boolean isUnitOfNothing(String name, Map<String, String[]> sent) {
+        String[] values = name.endsWith(UNIT) ? sent.get(name.substring(0, name.length() - UNIT.length())) : null;
+        return values != null && Arrays.stream(values).allMatch(String::isBlank);
+    }
+
+    private static String inWords(String name, String value) {
+        return name.equals("party") ? Party.byId(value).map(Party::words).orElse(value) : value;
     }
 
     private String label(String name) {

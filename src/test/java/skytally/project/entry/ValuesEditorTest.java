@@ -6,6 +6,7 @@ import java.time.Clock;
 import java.time.Instant;
 import java.time.ZoneOffset;
 import java.util.List;
+import java.util.Map;
 import java.util.Set;
 import org.junit.jupiter.api.DisplayName;
 import org.junit.jupiter.api.Test;
@@ -197,7 +198,7 @@ class ValuesEditorTest {
 
     @Test
     void leavesWhatAnotherProgramWroteUntouched() {
-        Values odd = new Values(java.util.Map.of(
+        Values odd = new Values(Map.of(
                 "shape", Stated.of(Claim.given("odd", "", Source.NONE, Party.OURS)),
                 "mountingHeight", Stated.of(Claim.given("3", "rod", Source.NONE, Party.OURS))));
         Reading reading = read(odd, OURS, "shape", "odd", "mountingHeight", "3", "mountingHeight-unit", "rod");
