@@ -84,7 +84,7 @@ class KeepPageTest {
         assertThat(place.text("note")).isEqualTo("Looked at 7° beside the lights.");
         assertThat(project.site().text("air")).isEqualTo("hazy");
         assertThat(project.site().get("groundReflectance").inUse().state()).isEqualTo(State.NOT_KNOWN);
-        SceneDrawing.Drawn drawn = SceneDrawing.of(project, scheme);
+        SceneDrawing.Drawn drawn = SceneDrawing.of(project, scheme, SceneDrawing.Period.EARLY);
         assertThat(drawn.leftOut()).isEmpty();
         assertThat(drawn.unplaced()).isEmpty();
     }

@@ -92,7 +92,7 @@ class SampleProjectsTest {
     void canBeDrawnInEverySchemeWithNothingLeftOutOrUnplaced(String name) {
         Project project = sample(name);
         for (Scheme scheme : project.schemes()) {
-            SceneDrawing.Drawn drawn = SceneDrawing.of(project, scheme);
+            SceneDrawing.Drawn drawn = SceneDrawing.of(project, scheme, SceneDrawing.Period.EARLY);
             assertThat(drawn.leftOut()).isEmpty();
             assertThat(drawn.unplaced()).isEmpty();
         }
