@@ -50,6 +50,9 @@ public record ChangeLine(
             return null;
         }
         ToldValue told = ToldValue.of(json);
+        if (told.value().isEmpty()) {
+            return null;
+        }
         return told.value().length() <= LONGEST
                 ? told
                 : new ToldValue(told.value().substring(0, LONGEST) + "…", told.note());

@@ -21,7 +21,7 @@ public record HistoryPage(
         @Nullable StepLine undone) {
 
     private static final int STEPS_A_PAGE = 20;
-    private static final int CHANGES_SHOWN = 40;
+    private static final int CHANGES_SHOWN = 20;
 
     /**
      * One save.
