@@ -1,10 +1,12 @@
 package skytally.project.shelf;
 
+import java.math.BigDecimal;
 import java.time.Instant;
 import java.util.HashMap;
 import java.util.List;
 import java.util.Map;
 import org.jspecify.annotations.Nullable;
+import skytally.notation.QuantityFormat;
 import skytally.project.Project;
 import skytally.project.Step;
 
@@ -21,7 +23,7 @@ public record HistoryPage(
         @Nullable StepLine undone) {
 
     private static final int STEPS_A_PAGE = 20;
-    private static final int CHANGES_SHOWN = 20;
+    private static final int CHANGES_SHOWN = 40;
 
     /**
      * One save.
@@ -47,6 +49,11 @@ public record HistoryPage(
 
         public int more() {
             return count - changes.size();
+        }
+
+        /** The count as it is printed. */
+        public String countText() {
+            return QuantityFormat.asTyped(BigDecimal.valueOf(count)).digits();
         }
     }
 
