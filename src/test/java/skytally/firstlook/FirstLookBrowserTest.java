@@ -45,8 +45,7 @@ class FirstLookBrowserTest {
 
             browser.awaitText(ANSWER_HEAD, "What you would see, 1 234 m away");
             assertThat(browser.driver().getCurrentUrl())
-                    .isEqualTo(browser.address("/?count=24&lumens=5200.5&spectralClass=hps&shape=flat-area"
-                            + "&mountingHeightM=6&distanceM=1234"));
+                    .isEqualTo(browser.address("/?count=24&lumens=5200.5&spectralClass=hps&distanceM=1234"));
             assertThat(find(browser, "lumens").getDomProperty("value")).isEqualTo("5\u00a0200.5");
             assertThat(new Select(find(browser, "spectralClass"))
                             .getFirstSelectedOption()
