@@ -52,8 +52,7 @@ class ArchitectureTest {
     private static final Map<String, List<String>> FEATURES = rooms("""
             storage    :
             web        :
-            project    : spectrum luminaire atmosphere scene web
-            firstlook  : spectrum luminaire atmosphere scene assessment charts web project
+            firstlook  : spectrum luminaire atmosphere scene assessment charts web
             """);
 
     /** Beside the JDK, the core may use these and no others. */
