@@ -52,7 +52,8 @@ class ArchitectureTest {
     private static final Map<String, List<String>> FEATURES = rooms("""
             storage    :
             web        :
-            firstlook  : spectrum luminaire atmosphere scene assessment charts web
+            project    : spectrum luminaire atmosphere scene web
+            firstlook  : spectrum luminaire atmosphere scene assessment charts web project
             """);
 
     /** Beside the JDK, the core may use these and no others. */

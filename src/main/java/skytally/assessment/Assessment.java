@@ -14,6 +14,7 @@ import java.util.Optional;
  * @param circumstance when and in what weather it holds
  * @param figures      by key, in the order of working
  * @param likenesses   of figures of light at the eye, by key; none for a light fainter than the faintest star
+ * @param contributions of every luminaire type at every place
  * @param influences   of every guess on every figure
  * @param notes        what limits the results, in sentences
  */
@@ -21,6 +22,7 @@ public record Assessment(
         Circumstance circumstance,
         Map<String, Figure> figures,
         Map<String, Likeness> likenesses,
+        List<Contribution> contributions,
         List<Influence> influences,
         List<Note> notes) {
 
@@ -50,6 +52,7 @@ public record Assessment(
     public Assessment {
         figures = Collections.unmodifiableMap(new LinkedHashMap<>(figures));
         likenesses = Map.copyOf(likenesses);
+        contributions = List.copyOf(contributions);
         influences = List.copyOf(influences);
         notes = List.copyOf(notes);
     }

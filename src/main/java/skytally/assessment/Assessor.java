@@ -6,6 +6,7 @@ import java.util.LinkedHashMap;
 import java.util.List;
 import java.util.Map;
 import java.util.Optional;
+import skytally.scene.Lamp;
 import skytally.scene.Look;
 import skytally.scene.Observer;
 import skytally.scene.OpenScene;
@@ -64,7 +65,38 @@ public final class Assessor {
                 figures.put(figure.key(), figure);
             }
             List<Assessment.Note> notes = new Notes(likely).all();
-            return new Assessment(circumstance, figures, likenesses(), influences, notes);
+            return new Assessment(circumstance, figures, likenesses(), contributions(), influences, notes);
+        }
+
+        /** A scene with the lamps of one type alone causes what that type contributes, since light adds. */
+        private List<Contribution> contributions() {
+            List<Contribution> contributions = new ArrayList<>();
+            for (PlaceNumbers whole : likely) {
+                Scene scene = whole.scene();
+                Map<String, List<Lamp>> byType = new LinkedHashMap<>();
+                scene.lamps()
+                        .forEach(lamp -> byType.computeIfAbsent(lamp.type(), type -> new ArrayList<>())
+                                .add(lamp));
+                byType.forEach((type, lamps) -> {
+                    PlaceNumbers alone = byType.size() == 1
+                            ? whole
+                            : new PlaceNumbers(
+                                    new Scene(lamps, scene.observers(), scene.surroundings()), whole.observer());
+                    contributions.add(contribution(type, alone));
+                });
+            }
+            return contributions;
+        }
+
+        private static Contribution contribution(String type, PlaceNumbers alone) {
+            return new Contribution(
+                    alone.observer().mark(),
+                    type,
+                    alone.get(Measure.ILLUMINANCE),
+                    alone.get(Measure.WINDOW_ILLUMINANCE),
+                    alone.inLook(Look.BESIDE, Measure.VEIL),
+                    alone.inLook(Look.ZENITH, Measure.SKY_ARTIFICIAL),
+                    alone.inLook(Look.TOWARD_SITE, Measure.SKY_ARTIFICIAL));
         }
 
         private Map<String, Likeness> likenesses() {

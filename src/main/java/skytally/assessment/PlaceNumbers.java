@@ -15,7 +15,6 @@ import skytally.eye.NaturalAnchors;
 import skytally.eye.PointVisibility;
 import skytally.eye.StarCount;
 import skytally.geometry.Direction;
-import skytally.glare.AngleRange;
 import skytally.glare.VeilReach;
 import skytally.glare.VeilingLuminance;
 import skytally.luminaire.FluxShare;
@@ -193,10 +192,12 @@ final class PlaceNumbers {
                 : Double.NaN;
     }
 
-    /** The veil of one lux, none beyond the angles the form is printed for. */
+    /**
+     * The veil of one lux: none beyond the angles the form is printed for, and nearer than it holds, straight at a
+     * lamp, at least what it is at its nearest.
+     */
     private static double veilPerLux(double angleDeg) {
-        AngleRange range = VEIL.validity();
-        double inside = Math.abs(angleDeg - range.fromDeg()) < 1e-9 ? range.fromDeg() : angleDeg;
+        double inside = Math.max(VEIL.validity().fromDeg(), angleDeg);
         return inside > VeilingLuminance.WIDEST_PRINTED_DEG + 1e-9 ? 0 : VEIL.perLux(inside);
     }
 
@@ -210,6 +211,17 @@ final class PlaceNumbers {
 
     double get(Measure measure, int look) {
         return ofLooks[look][measure.ordinal()];
+    }
+
+    /** A number of the direction with this id; NaN where the place has none of it. */
+    double inLook(String id, Measure measure) {
+        List<Look> looks = observer.looks();
+        for (int i = 0; i < looks.size(); i++) {
+            if (looks.get(i).id().equals(id)) {
+                return get(measure, i);
+            }
+        }
+        return Double.NaN;
     }
 
     SkyLight sky(int look) {

@@ -45,6 +45,8 @@ class FirstLookController {
         page.addObject("passedOver", SentenceReader.passedOver(sent));
         page.addObject("form", SentenceForm.of(sent, read, switches.units()));
         read.sentence()
+                .ifPresent(sentence -> page.addObject("keep", KeepForm.of(sentence, SentenceProject.title(sentence))));
+        read.sentence()
                 .map(answers::to)
                 .ifPresentOrElse(
                         answer -> page.addObject("answer", FirstLookPage.of(answer, switches.units())),

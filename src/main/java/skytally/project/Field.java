@@ -1,0 +1,71 @@
+package skytally.project;
+
+import java.math.BigDecimal;
+import java.util.List;
+import java.util.Optional;
+import org.jspecify.annotations.Nullable;
+
+/**
+ * What can be said about one kind of thing, and what may be typed there.
+ *
+ * @param subject  whose field it is
+ * @param name     in files and addresses
+ * @param label    in words
+ * @param kind     what may be typed
+ * @param units    that may be chosen, the first the one results are reckoned in; none for words and plain numbers
+ * @param least    in the first unit, or nothing
+ * @param most     in the first unit, or nothing
+ * @param choices  the words to choose from
+ * @param standIn  what stands in while it is not known, or nothing
+ */
+public record Field(
+        Subject subject,
+        String name,
+        String label,
+        Kind kind,
+        List<String> units,
+        @Nullable BigDecimal least,
+        @Nullable BigDecimal most,
+        List<String> choices,
+        Optional<StandIn> standIn) {
+
+    /** Whose field it is. */
+    public enum Subject {
+        SITE,
+        TYPE,
+        LIGHT,
+        PLACE
+    }
+
+    /** What may be typed. */
+    public enum Kind {
+        TEXT,
+        WHOLE,
+        NUMBER,
+        CHOICE;
+
+        public boolean isNumber() {
+            return this == WHOLE || this == NUMBER;
+        }
+    }
+
+    /**
+     * A value for the time being, in the field's first unit.
+     *
+     * @param likely used
+     * @param low    one end of its range
+     * @param high   the other end
+     * @param why    the reason, as printed
+     */
+    public record StandIn(String likely, String low, String high, String why) {}
+
+    public Field {
+        units = List.copyOf(units);
+        choices = List.copyOf(choices);
+    }
+
+    /** The unit results are reckoned in, or empty. */
+    public String firstUnit() {
+        return units.isEmpty() ? "" : units.get(0);
+    }
+}

@@ -1,0 +1,4 @@
+package skytally.project.entry;
+
+/** Something to choose, and its words. */
+public record Option(String value, String words) {}

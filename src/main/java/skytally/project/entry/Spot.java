@@ -1,0 +1,61 @@
+package skytally.project.entry;
+
+import java.math.BigDecimal;
+import java.math.RoundingMode;
+import java.util.Optional;
+import skytally.geometry.Position;
+import skytally.notation.QuantityFormat;
+import skytally.project.Values;
+
+/**
+ * A point on the ground.
+ *
+ * @param eastM  of the reference point
+ * @param northM of the reference point
+ */
+public record Spot(double eastM, double northM) {
+
+    private static final int CENTIMETRES = 2;
+
+    /** Where the values say, if they say where. */
+    public static Optional<Spot> of(Values values) {
+        return of(values, "east", "north");
+    }
+
+    /** Where two of the values say, if both are known. */
+    public static Optional<Spot> of(Values values, String east, String north) {
+        Optional<BigDecimal> eastM = Amount.of(values.get(east).inUse());
+        Optional<BigDecimal> northM = Amount.of(values.get(north).inUse());
+        return eastM.isEmpty() || northM.isEmpty()
+                ? Optional.empty()
+                : Optional.of(new Spot(eastM.get().doubleValue(), northM.get().doubleValue()));
+    }
+
+    /** The point at a distance on a bearing from this one. */
+    public Spot at(double distanceM, double bearingDeg) {
+        double bearing = StrictMath.toRadians(bearingDeg);
+        return new Spot(eastM + distanceM * StrictMath.sin(bearing), northM + distanceM * StrictMath.cos(bearing));
+    }
+
+    /** A point of the way to another: 0 here, 1 there. */
+    public Spot toward(Spot end, double share) {
+        return new Spot(eastM + (end.eastM - eastM) * share, northM + (end.northM - northM) * share);
+    }
+
+    /** Metres to the centimetre, as it is kept. */
+    public static String metres(double metres) {
+        BigDecimal rounded = BigDecimal.valueOf(metres).setScale(CENTIMETRES, RoundingMode.HALF_EVEN);
+        return rounded.signum() == 0 ? "0" : rounded.stripTrailingZeros().toPlainString();
+    }
+
+    /** Distance and bearing from the reference point, written out. */
+    public String fromReference(Words words) {
+        Position reference = new Position(0, 0, 0);
+        Position here = new Position(eastM, northM, 0);
+        double bearing = (StrictMath.toDegrees(reference.bearingTo(here)) + 360) % 360;
+        return words.say(
+                "position.from-reference",
+                QuantityFormat.decimals(reference.groundDistanceTo(here), 1).plain(),
+                QuantityFormat.decimals(bearing, 1).plain());
+    }
+}

@@ -1,0 +1,25 @@
+package skytally.project.entry;
+
+import java.util.Locale;
+import java.util.Optional;
+import org.springframework.context.MessageSource;
+import org.springframework.stereotype.Component;
+
+/** The words of the message file. */
+@Component
+public class Words {
+
+    private final MessageSource messages;
+
+    Words(MessageSource messages) {
+        this.messages = messages;
+    }
+
+    public String say(String key, Object... with) {
+        return messages.getMessage(key, with, Locale.ENGLISH);
+    }
+
+    public Optional<String> find(String key) {
+        return Optional.ofNullable(messages.getMessage(key, null, null, Locale.ENGLISH));
+    }
+}

@@ -1,0 +1,361 @@
+package skytally.project.transfer;
+
+import java.nio.ByteBuffer;
+import java.nio.charset.CharacterCodingException;
+import java.nio.charset.StandardCharsets;
+import java.util.Arrays;
+import java.util.List;
+import java.util.Map;
+import java.util.UUID;
+import java.util.stream.Collectors;
+import skytally.project.Claim;
+import skytally.project.Document;
+import skytally.project.LuminaireType;
+import skytally.project.Party;
+import skytally.project.Place;
+import skytally.project.Placement;
+import skytally.project.Project;
+import skytally.project.Scheme;
+import skytally.project.Source;
+import skytally.project.Stated;
+import skytally.project.Values;
+import skytally.scene.State;
+import tools.jackson.core.JacksonException;
+import tools.jackson.core.StreamReadConstraints;
+import tools.jackson.core.StreamReadFeature;
+import tools.jackson.core.exc.StreamConstraintsException;
+import tools.jackson.core.json.JsonFactory;
+import tools.jackson.databind.JsonNode;
+import tools.jackson.databind.json.JsonMapper;
+import tools.jackson.databind.node.ArrayNode;
+import tools.jackson.databind.node.ObjectNode;
+
+/**
+ * The project file: one JSON document whose members are named as in the project. What is empty is left out, members
+ * stand in one order and lists in theirs, so the same project is the same text, byte for byte.
+ *
+ * <p>Reading refuses what it does not know, with the path to it: another version, an unknown or repeated member, a
+ * value of the wrong kind. It never changes what it reads to make it fit.
+ */
+public final class ProjectFile {
+
+    /** The version of the form; a change of form is a new number and a step that lifts the old one. */
+    public static final int FORMAT_VERSION = 1;
+
+    /** Largest file, in bytes. */
+    public static final int LARGEST_BYTES = 25 * 1024 * 1024;
+
+    private static final int DEEPEST = 32;
+
+    private static final JsonMapper JSON = JsonMapper.builder(JsonFactory.builder()
+                    .enable(StreamReadFeature.STRICT_DUPLICATE_DETECTION)
+                    .streamReadConstraints(StreamReadConstraints.builder()
+                            .maxNestingDepth(DEEPEST)
+                            .maxDocumentLength(LARGEST_BYTES)
+                            .maxStringLength(LARGEST_BYTES)
+                            .maxNameLength(200)
+                            .build())
+                    .build())
+            .build();
+
+    private ProjectFile() {}
+
+    /** The canonical text of a project, UTF-8, two spaces a level, ending with a line end. */
+    public static byte[] write(Project project) {
+        return text(written(project));
+    }
+
+    /** The text of a tree as files have it. */
+    static byte[] text(ObjectNode tree) {
+        String text =
+                JSON.writerWithDefaultPrettyPrinter().writeValueAsString(tree).replace("\r\n", "\n");
+        return (text + "\n").getBytes(StandardCharsets.UTF_8);
+    }
+
+    static ObjectNode tree(Project project) {
+        return written(project);
+    }
+
+    static ObjectNode newObject() {
+        return JSON.createObjectNode();
+    }
+
+    static ArrayNode newList() {
+        return JSON.createArrayNode();
+    }
+
+    static JsonNode value(String json) throws ProjectFileException {
+        try {
+            return JSON.readTree(json);
+        } catch (JacksonException broken) {
+            throw new ProjectFileException("", "A kept change is not whole: " + broken.getOriginalMessage());
+        }
+    }
+
+    /**
+     * Reads a project file.
+     *
+     * @throws ProjectFileException if it is not one, with the path and the reason
+     */
+    public static Project read(byte[] bytes) throws ProjectFileException {
+        if (bytes.length == 0) {
+            throw new ProjectFileException("", "The file is empty.");
+        }
+        if (bytes.length > LARGEST_BYTES) {
+            throw new ProjectFileException("", "The file is larger than 25 MB, the most a project file may be.");
+        }
+        JsonNode tree;
+        try {
+            String text = StandardCharsets.UTF_8
+                    .newDecoder()
+                    .decode(ByteBuffer.wrap(bytes))
+                    .toString();
+            tree = JSON.readTree(text.startsWith("\uFEFF") ? text.substring(1) : text);
+        } catch (CharacterCodingException notText) {
+            throw new ProjectFileException("", "The file is not text in UTF-8, so it is no project file.");
+        } catch (StreamConstraintsException tooMuch) {
+            throw new ProjectFileException(
+                    "", "The file is nested deeper than " + DEEPEST + " levels or holds too long a text.");
+        } catch (JacksonException broken) {
+            throw new ProjectFileException("", broken(broken));
+        }
+        return FileObject.made(new FileObject(tree, ""), ProjectFile::project);
+    }
+
+    private static String broken(JacksonException broken) {
+        String where = broken.getLocation() == null
+                ? ""
+                : " at line " + broken.getLocation().getLineNr() + ", column "
+                        + broken.getLocation().getColumnNr();
+        String message = broken.getOriginalMessage();
+        return message != null && message.startsWith("Duplicate")
+                ? "The file names a member twice" + where + ". Leave one of them."
+                : "The file is not whole or not JSON" + where + ". Take it again from where it was saved.";
+    }
+
+    private static Project project(FileObject file) throws ProjectFileException {
+        int version = file.wholeOr("formatVersion", 0);
+        if (version != FORMAT_VERSION) {
+            throw new ProjectFileException(
+                    "/formatVersion",
+                    version == 0
+                            ? "is missing, so this is no project file."
+                            : "is " + version + ", but this version of the program reads " + FORMAT_VERSION
+                                    + ". Open it with the program that wrote it.");
+        }
+        return new Project(
+                id(file),
+                file.text("title"),
+                file.list("documents", ProjectFile::document),
+                file.object("site", ProjectFile::values, Values.NONE),
+                file.list("schemes", ProjectFile::scheme),
+                file.list("places", ProjectFile::place));
+    }
+
+    private static UUID id(FileObject file) throws ProjectFileException {
+        String id = file.text("id");
+        try {
+            UUID uuid = UUID.fromString(id);
+            if (uuid.toString().equals(id)) {
+                return uuid;
+            }
+        } catch (IllegalArgumentException notOne) {
+            // told below, in our own words
+        }
+        throw new ProjectFileException("/id", "must be 32 small hexadecimal digits in five groups with hyphens.");
+    }
+
+    private static Document document(FileObject object) throws ProjectFileException {
+        return new Document(
+                object.text("mark"),
+                object.text("title"),
+                object.textOrEmpty("date"),
+                object.textOrEmpty("revision"),
+                object.textOrEmpty("from"));
+    }
+
+    private static Scheme scheme(FileObject object) throws ProjectFileException {
+        String kind = object.text("kind");
+        return new Scheme(
+                object.text("mark"),
+                Scheme.Kind.byId(kind)
+                        .orElseThrow(() -> new IllegalArgumentException(
+                                "A scheme is existing, proposed or option, not “" + kind + "”")),
+                object.text("name"),
+                object.list("types", type -> new LuminaireType(type.text("mark"), values(type, "values"))),
+                object.list(
+                        "placements",
+                        light -> new Placement(light.text("mark"), light.text("type"), values(light, "values"))));
+    }
+
+    private static Place place(FileObject object) throws ProjectFileException {
+        return new Place(
+                object.text("mark"),
+                values(object, "values"),
+                object.list(
+                        "looks",
+                        look -> new Place.NamedLook(
+                                look.text("name"), number(look, "bearingDeg"), number(look, "altitudeDeg"))),
+                object.list(
+                        "horizon",
+                        point -> new Place.HorizonPoint(number(point, "bearingDeg"), number(point, "altitudeDeg"))));
+    }
+
+    private static double number(FileObject object, String member) throws ProjectFileException {
+        String text = object.text(member);
+        try {
+            return Double.parseDouble(text);
+        } catch (NumberFormatException notOne) {
+            throw new ProjectFileException(object.path() + "/" + member, "must be a number, not “" + text + "”.");
+        }
+    }
+
+    private static Values values(FileObject object, String member) throws ProjectFileException {
+        return object.object(member, ProjectFile::values, Values.NONE);
+    }
+
+    private static Values values(FileObject object) throws ProjectFileException {
+        return new Values(object.byName(ProjectFile::stated));
+    }
+
+    static Stated stated(FileObject object) throws ProjectFileException {
+        List<Claim> claims = object.list("claims", ProjectFile::claim);
+        return new Stated(claims, object.wholeOr("used", 0));
+    }
+
+    private static Claim claim(FileObject object) throws ProjectFileException {
+        return new Claim(
+                object.textOrEmpty("value"),
+                object.textOrEmpty("unit"),
+                state(object),
+                object.textOrEmpty("low"),
+                object.textOrEmpty("high"),
+                object.object("source", ProjectFile::source, Source.NONE),
+                party(object),
+                object.textOrEmpty("date"),
+                object.textOrEmpty("who"));
+    }
+
+    private static State state(FileObject object) throws ProjectFileException {
+        String words = object.text("state");
+        return Arrays.stream(State.values())
+                .filter(state -> state.words().equals(words))
+                .findFirst()
+                .orElseThrow(() -> new IllegalArgumentException(
+                        "A state is given, worked out, assumed or not known, not “" + words + "”"));
+    }
+
+    private static Party party(FileObject object) throws ProjectFileException {
+        String id = object.text("party");
+        return Party.byId(id)
+                .orElseThrow(() -> new IllegalArgumentException("A party is "
+                        + Arrays.stream(Party.values()).map(Party::id).collect(Collectors.joining(", "))
+                        + ", not “" + id + "”"));
+    }
+
+    private static Source source(FileObject object) throws ProjectFileException {
+        return new Source(object.textOrEmpty("document"), object.textOrEmpty("place"), object.textOrEmpty("reason"));
+    }
+
+    private static ObjectNode written(Project project) {
+        ObjectNode file = JSON.createObjectNode();
+        file.put("formatVersion", FORMAT_VERSION);
+        file.put("id", project.id().toString());
+        file.put("title", project.title());
+        ArrayNode documents = file.putArray("documents");
+        for (Document document : project.documents()) {
+            ObjectNode node = documents.addObject();
+            node.put("mark", document.mark());
+            node.put("title", document.title());
+            putUnlessEmpty(node, "date", document.date());
+            putUnlessEmpty(node, "revision", document.revision());
+            putUnlessEmpty(node, "from", document.from());
+        }
+        put(file, "site", project.site());
+        ArrayNode schemes = file.putArray("schemes");
+        project.schemes().forEach(scheme -> write(schemes.addObject(), scheme));
+        ArrayNode places = file.putArray("places");
+        project.places().forEach(place -> write(places.addObject(), place));
+        return file;
+    }
+
+    private static void write(ObjectNode node, Scheme scheme) {
+        node.put("mark", scheme.mark());
+        node.put("kind", scheme.kind().id());
+        node.put("name", scheme.name());
+        ArrayNode types = node.putArray("types");
+        for (LuminaireType type : scheme.types()) {
+            ObjectNode one = types.addObject();
+            one.put("mark", type.mark());
+            put(one, "values", type.values());
+        }
+        ArrayNode placements = node.putArray("placements");
+        for (Placement placement : scheme.placements()) {
+            ObjectNode one = placements.addObject();
+            one.put("mark", placement.mark());
+            one.put("type", placement.type());
+            put(one, "values", placement.values());
+        }
+    }
+
+    private static void write(ObjectNode node, Place place) {
+        node.put("mark", place.mark());
+        put(node, "values", place.values());
+        if (!place.looks().isEmpty()) {
+            ArrayNode looks = node.putArray("looks");
+            for (Place.NamedLook look : place.looks()) {
+                ObjectNode one = looks.addObject();
+                one.put("name", look.name());
+                one.put("bearingDeg", Double.toString(look.bearingDeg()));
+                one.put("altitudeDeg", Double.toString(look.altitudeDeg()));
+            }
+        }
+        if (!place.horizon().isEmpty()) {
+            ArrayNode horizon = node.putArray("horizon");
+            for (Place.HorizonPoint point : place.horizon()) {
+                ObjectNode one = horizon.addObject();
+                one.put("bearingDeg", Double.toString(point.bearingDeg()));
+                one.put("altitudeDeg", Double.toString(point.altitudeDeg()));
+            }
+        }
+    }
+
+    private static void put(ObjectNode node, String member, Values values) {
+        if (values.byField().isEmpty()) {
+            return;
+        }
+        ObjectNode fields = node.putObject(member);
+        for (Map.Entry<String, Stated> field : values.byField().entrySet()) {
+            ObjectNode stated = fields.putObject(field.getKey());
+            ArrayNode claims = stated.putArray("claims");
+            field.getValue().claims().forEach(claim -> write(claims.addObject(), claim));
+            if (field.getValue().used() != 0) {
+                stated.put("used", field.getValue().used());
+            }
+        }
+    }
+
+    private static void write(ObjectNode node, Claim claim) {
+        putUnlessEmpty(node, "value", claim.value());
+        putUnlessEmpty(node, "unit", claim.unit());
+        node.put("state", claim.state().words());
+        putUnlessEmpty(node, "low", claim.low());
+        putUnlessEmpty(node, "high", claim.high());
+        Source source = claim.source();
+        if (!source.isNone()) {
+            ObjectNode from = node.putObject("source");
+            putUnlessEmpty(from, "document", source.document());
+            putUnlessEmpty(from, "place", source.place());
+            putUnlessEmpty(from, "reason", source.reason());
+        }
+        node.put("party", claim.party().id());
+        putUnlessEmpty(node, "date", claim.date());
+        putUnlessEmpty(node, "who", claim.who());
+    }
+
+    private static void putUnlessEmpty(ObjectNode node, String member, String text) {
+        if (!text.isEmpty()) {
+            node.put(member, text);
+        }
+    }
+}
