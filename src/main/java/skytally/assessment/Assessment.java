@@ -6,6 +6,7 @@ import java.util.LinkedHashMap;
 import java.util.List;
 import java.util.Map;
 import java.util.Optional;
+import skytally.geometry.Position;
 
 /**
  * Everything worked out of a scene: the second doorway of the house. Pages, pictures and files read it and work out
@@ -15,6 +16,7 @@ import java.util.Optional;
  * @param figures      by key, in the order of working
  * @param likenesses   of figures of light at the eye, by key; none for a light fainter than the faintest star
  * @param contributions of every luminaire type at every place
+ * @param eyes         where the eye of each place is, by mark; the worst point of the property line is among them
  * @param influences   of every guess on every figure
  * @param notes        what limits the results, in sentences
  */
@@ -23,14 +25,19 @@ public record Assessment(
         Map<String, Figure> figures,
         Map<String, Likeness> likenesses,
         List<Contribution> contributions,
+        Map<String, Position> eyes,
         List<Influence> influences,
         List<Note> notes) {
+
+    /** Mark of the worst point of the property line, a place found by searching. */
+    public static final String PROPERTY_LINE = "property-line";
 
     /** What a note is about. */
     public enum Topic {
         BELOW_HORIZON,
         NO_LIGHT_AT_ALL,
         NO_DIRECT_LIGHT,
+        HIDDEN_BY_GROUND,
         TOO_NEAR,
         SMALL_PATCH,
         NOT_A_POINT,
@@ -45,14 +52,16 @@ public record Assessment(
      * A limit to what the numbers say.
      *
      * @param topic    what it is about
+     * @param place    mark of the place it holds for, or empty for all
      * @param sentence as printed
      */
-    public record Note(Topic topic, String sentence) {}
+    public record Note(Topic topic, String place, String sentence) {}
 
     public Assessment {
         figures = Collections.unmodifiableMap(new LinkedHashMap<>(figures));
         likenesses = Map.copyOf(likenesses);
         contributions = List.copyOf(contributions);
+        eyes = Collections.unmodifiableMap(new LinkedHashMap<>(eyes));
         influences = List.copyOf(influences);
         notes = List.copyOf(notes);
     }
@@ -86,6 +95,11 @@ public record Assessment(
         return influences.stream()
                 .filter(influence -> influence.figure().equals(figure.key()) && influence.strength() > 0)
                 .max(Comparator.comparingDouble(Influence::strength));
+    }
+
+    /** The figure of a place if it has one by that measure. */
+    public Optional<Figure> find(String place, String measure) {
+        return Optional.ofNullable(figures.get(key(place, measure, circumstance)));
     }
 
     public boolean has(Topic topic) {

@@ -6,7 +6,7 @@ import java.util.LinkedHashMap;
 import java.util.List;
 import java.util.Map;
 import java.util.Optional;
-import skytally.scene.Lamp;
+import skytally.geometry.Position;
 import skytally.scene.Look;
 import skytally.scene.Observer;
 import skytally.scene.OpenScene;
@@ -47,14 +47,17 @@ public final class Assessor {
         }
 
         private List<PlaceNumbers> at(Map<String, End> ends) {
-            return drawn.computeIfAbsent(ends, key -> {
-                Scene scene = open.drawn(key);
-                List<PlaceNumbers> places = new ArrayList<>();
-                for (Observer observer : scene.observers()) {
-                    places.add(new PlaceNumbers(scene, observer));
-                }
-                return places;
-            });
+            return drawn.computeIfAbsent(ends, key -> places(open.drawn(key)));
+        }
+
+        /** Place by place on all processors; each is worked out by itself, so their order changes nothing. */
+        private List<PlaceNumbers> places(Scene scene) {
+            SceneLights lights = new SceneLights(scene);
+            List<Observer> observers = new ArrayList<>(scene.observers());
+            PropertyLine.of(scene).worstPoint(lights.direct()).ifPresent(observers::add);
+            return observers.parallelStream()
+                    .map(observer -> new PlaceNumbers(lights, observer))
+                    .toList();
         }
 
         Assessment assessment() {
@@ -64,39 +67,19 @@ public final class Assessor {
                 Figure figure = figure(slot, influences);
                 figures.put(figure.key(), figure);
             }
-            List<Assessment.Note> notes = new Notes(likely).all();
-            return new Assessment(circumstance, figures, likenesses(), contributions(), influences, notes);
-        }
-
-        /** A scene with the lamps of one type alone causes what that type contributes, since light adds. */
-        private List<Contribution> contributions() {
-            List<Contribution> contributions = new ArrayList<>();
-            for (PlaceNumbers whole : likely) {
-                Scene scene = whole.scene();
-                Map<String, List<Lamp>> byType = new LinkedHashMap<>();
-                scene.lamps()
-                        .forEach(lamp -> byType.computeIfAbsent(lamp.type(), type -> new ArrayList<>())
-                                .add(lamp));
-                byType.forEach((type, lamps) -> {
-                    PlaceNumbers alone = byType.size() == 1
-                            ? whole
-                            : new PlaceNumbers(
-                                    new Scene(lamps, scene.observers(), scene.surroundings()), whole.observer());
-                    contributions.add(contribution(type, alone));
-                });
-            }
-            return contributions;
-        }
-
-        private static Contribution contribution(String type, PlaceNumbers alone) {
-            return new Contribution(
-                    alone.observer().mark(),
-                    type,
-                    alone.get(Measure.ILLUMINANCE),
-                    alone.get(Measure.WINDOW_ILLUMINANCE),
-                    alone.inLook(Look.BESIDE, Measure.VEIL),
-                    alone.inLook(Look.ZENITH, Measure.SKY_ARTIFICIAL),
-                    alone.inLook(Look.TOWARD_SITE, Measure.SKY_ARTIFICIAL));
+            Map<String, Position> eyes = new LinkedHashMap<>();
+            likely.forEach(place ->
+                    eyes.put(place.observer().mark(), place.observer().eye()));
+            return new Assessment(
+                    circumstance,
+                    figures,
+                    likenesses(),
+                    likely.stream()
+                            .flatMap(place -> place.contributions().stream())
+                            .toList(),
+                    eyes,
+                    influences,
+                    new Notes(likely).all());
         }
 
         private Map<String, Likeness> likenesses() {
@@ -114,14 +97,15 @@ public final class Assessor {
             List<Slot> slots = new ArrayList<>();
             for (int place = 0; place < likely.size(); place++) {
                 for (Measure measure : Measure.values()) {
-                    if (measure.isOfPlace()) {
+                    if (measure.isOf(likely.get(place).observer())) {
                         slots.add(new Slot(place, -1, measure));
                     }
                 }
-                List<Look> looks = likely.get(place).observer().looks();
+                List<Look> looks = likely.get(place).looks();
+                boolean presentKnown = likely.get(place).scene().present().isPresent();
                 for (int look = 0; look < looks.size(); look++) {
                     for (Measure measure : Measure.values()) {
-                        if (measure.isOf(looks.get(look))) {
+                        if (measure.isOf(looks.get(look), presentKnown)) {
                             slots.add(new Slot(place, look, measure));
                         }
                     }
@@ -140,7 +124,7 @@ public final class Assessor {
             Measure measure = slot.measure();
             String path = slot.look() < 0
                     ? measure.path()
-                    : measure.path(numbers.observer().looks().get(slot.look()));
+                    : measure.path(numbers.looks().get(slot.look()));
             String key = Assessment.key(numbers.observer().mark(), path, circumstance);
             Workings workings = new Workings(numbers, open);
             Working working = slot.look() < 0 ? workings.of(measure) : workings.of(measure, slot.look());

@@ -1,8 +1,11 @@
 package skytally.assessment;
 
+import java.util.Arrays;
 import java.util.HashMap;
+import java.util.LinkedHashMap;
 import java.util.List;
 import java.util.Map;
+import org.jspecify.annotations.Nullable;
 import skytally.atmosphere.Atmosphere;
 import skytally.atmosphere.DirectPath;
 import skytally.atmosphere.ExponentialLayer;
@@ -12,7 +15,9 @@ import skytally.geometry.Direction;
 import skytally.geometry.Position;
 import skytally.geometry.Rotation;
 import skytally.luminaire.IntensityDistribution;
+import skytally.scene.GroundLine;
 import skytally.scene.Lamp;
+import skytally.scene.Observer;
 import skytally.spectrum.Spectrum;
 
 /**
@@ -38,6 +43,9 @@ public final class DirectLight {
     private final double[] count;
     private final IntensityDistribution[] light;
     private final LuminousTransmission[] passed;
+    private final int[] type;
+    private final List<String> types;
+    private final List<Lamp> scene;
     private final double aerosolHeight;
 
     /**
@@ -45,6 +53,7 @@ public final class DirectLight {
      * @param air   what their light comes through on its way to an eye
      */
     public DirectLight(List<Lamp> scene, Atmosphere air) {
+        this.scene = List.copyOf(scene);
         lamps = scene.size();
         east = new double[lamps];
         north = new double[lamps];
@@ -57,6 +66,8 @@ public final class DirectLight {
         count = new double[lamps];
         light = new IntensityDistribution[lamps];
         passed = new LuminousTransmission[lamps];
+        type = new int[lamps];
+        Map<String, Integer> typeIndex = new LinkedHashMap<>();
         aerosolHeight = air.aerosol().scaleHeightM();
         Map<Spectrum, LuminousTransmission> shared = new HashMap<>();
         for (int i = 0; i < lamps; i++) {
@@ -71,8 +82,10 @@ public final class DirectLight {
             count[i] = lamp.count();
             light[i] = lamp.light();
             passed[i] = shared.computeIfAbsent(lamp.spectrum(), spectrum -> new LuminousTransmission(spectrum, air));
+            type[i] = typeIndex.computeIfAbsent(lamp.type(), mark -> typeIndex.size());
             store(lamp.attitude().rotation().inverse(), 9 * i);
         }
+        types = List.copyOf(typeIndex.keySet());
     }
 
     private void store(Rotation toOwn, int at) {
@@ -87,13 +100,24 @@ public final class DirectLight {
         turn[at + 8] = toOwn.zz();
     }
 
+    /** Marks of the luminaire types, in the order of the sums by type. */
+    public List<String> types() {
+        return types;
+    }
+
     /** What one eye gets; filled anew by {@link #at}. */
     public static final class Sum {
 
         private double seenLx;
         private double inVacuumLx;
         private double windowLx;
+        private double levelLx;
         private double veilCdM2;
+        private double veilInVacuumCdM2;
+        private int hidden;
+        private double[] seenByType = new double[0];
+        private double[] windowByType = new double[0];
+        private double[] veilByType = new double[0];
         private double brightestLx;
         private int brightest;
 
@@ -112,9 +136,59 @@ public final class DirectLight {
             return windowLx;
         }
 
+        /** On a level plane at the eye, facing up, with nothing taken by the air, in lux. */
+        public double levelLx() {
+            return levelLx;
+        }
+
         /** Veil over the direction looked in, cd/m²; 0 where none was asked for. */
         public double veilCdM2() {
             return veilCdM2;
+        }
+
+        /** The same with nothing taken by the air, as limits count it, cd/m². */
+        public double veilInVacuumCdM2() {
+            return veilInVacuumCdM2;
+        }
+
+        /** How many positions the ground hides that would be seen over a bare Earth. */
+        public int hidden() {
+            return hidden;
+        }
+
+        /** {@link #seenLx()} of one type, by its index in {@link DirectLight#types()}. */
+        public double seenLx(int type) {
+            return seenByType[type];
+        }
+
+        /** {@link #windowLx()} of one type. */
+        public double windowLx(int type) {
+            return windowByType[type];
+        }
+
+        /** {@link #veilCdM2()} of one type. */
+        public double veilCdM2(int type) {
+            return veilByType[type];
+        }
+
+        private void clear(int types) {
+            seenLx = 0;
+            inVacuumLx = 0;
+            windowLx = 0;
+            levelLx = 0;
+            veilCdM2 = 0;
+            veilInVacuumCdM2 = 0;
+            hidden = 0;
+            brightestLx = 0;
+            brightest = -1;
+            if (seenByType.length != types) {
+                seenByType = new double[types];
+                windowByType = new double[types];
+                veilByType = new double[types];
+            }
+            Arrays.fill(seenByType, 0);
+            Arrays.fill(windowByType, 0);
+            Arrays.fill(veilByType, 0);
         }
 
         /** Light of the brightest single lamp through the air, in lux. */
@@ -148,12 +222,31 @@ public final class DirectLight {
      * @param sum    to be filled
      */
     public void at(Position eye, Direction facing, Direction look, Veil veil, Sum sum) {
-        sum.seenLx = 0;
-        sum.inVacuumLx = 0;
-        sum.windowLx = 0;
-        sum.veilCdM2 = 0;
-        sum.brightestLx = 0;
-        sum.brightest = -1;
+        each(eye, facing, GroundLine.OPEN, look, veil, sum, null);
+    }
+
+    /** The same where ground may hide some of the lamps. */
+    public void at(Observer observer, Direction look, Veil veil, Sum sum) {
+        each(observer.eye(), observer.facing(), observer.ground(), look, veil, sum, null);
+    }
+
+    /** The upright plane that gets most from all lamps together, of the 360 that face a whole degree. */
+    public UprightPlane brightestPlane(Observer observer) {
+        UprightPlane.Search search = new UprightPlane.Search();
+        each(observer.eye(), observer.facing(), observer.ground(), Direction.UP, Veil.NONE, new Sum(), search);
+        return search.found();
+    }
+
+    private void each(
+            Position eye,
+            Direction facing,
+            GroundLine ground,
+            Direction look,
+            Veil veil,
+            Sum sum,
+            UprightPlane.@Nullable Search planes) {
+        sum.clear(types.size());
+        boolean bare = ground.points().isEmpty();
         boolean veiled = veil != Veil.NONE;
         double eyeHeight = eye.heightM();
         double eyeRadius = EARTH + eyeHeight;
@@ -190,6 +283,10 @@ public final class DirectLight {
             if (perLumen == 0) {
                 continue;
             }
+            if (!bare && ground.hides(scene.get(i).position(), eye)) {
+                sum.hidden++;
+                continue;
+            }
             double oneInVacuum = lumens[i] * perLumen * inverse * inverse;
             double distance = 1 / inverse;
             double molecules = ExponentialLayer.between(
@@ -206,11 +303,23 @@ public final class DirectLight {
             double towardX = dx * levelAtEye;
             double towardY = dy * levelAtEye;
             double onWindow = facing.x() * towardX + facing.y() * towardY + facing.z() * upAtEye;
-            sum.inVacuumLx += count[i] * oneInVacuum;
-            sum.windowLx += count[i] * oneInVacuum * Math.max(0, onWindow);
-            sum.seenLx += count[i] * one;
+            double allInVacuum = count[i] * oneInVacuum;
+            double window = allInVacuum * Math.max(0, onWindow);
+            double seen = count[i] * one;
+            sum.inVacuumLx += allInVacuum;
+            sum.windowLx += window;
+            sum.levelLx += allInVacuum * Math.max(0, upAtEye);
+            sum.seenLx += seen;
+            sum.windowByType[type[i]] += window;
+            sum.seenByType[type[i]] += seen;
             if (veiled) {
-                sum.veilCdM2 += count[i] * one * veil.perLux(angleDeg(look, towardX, towardY, upAtEye));
+                double perLux = veil.perLux(angleDeg(look, towardX, towardY, upAtEye));
+                sum.veilCdM2 += seen * perLux;
+                sum.veilInVacuumCdM2 += allInVacuum * perLux;
+                sum.veilByType[type[i]] += seen * perLux;
+            }
+            if (planes != null) {
+                planes.add(allInVacuum * towardX, allInVacuum * towardY);
             }
         }
     }

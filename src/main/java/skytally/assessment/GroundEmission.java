@@ -3,8 +3,12 @@ package skytally.assessment;
 import java.util.List;
 import skytally.skyglow.Emission;
 
-/** What matt ground sends back of one lumen it reflects, from one point at its level: {@code cos z / π}. */
-record GroundEmission() implements Emission {
+/**
+ * What matt ground sends back of one lumen it reflects, from one point at its level: {@code cos z / π}.
+ *
+ * @param heightM of that ground
+ */
+record GroundEmission(double heightM) implements Emission {
 
     @Override
     public double toward(double ahead, double left, double up) {
@@ -14,10 +18,4 @@ record GroundEmission() implements Emission {
     @Override
     public List<Cone> edges() {
         return List.of();
-    }
-
-    @Override
-    public double heightM() {
-        return 0;
-    }
-}
+    }}

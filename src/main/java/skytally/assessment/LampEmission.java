@@ -2,10 +2,10 @@ package skytally.assessment;
 
 import java.util.ArrayList;
 import java.util.List;
+import skytally.geometry.Attitude;
 import skytally.geometry.Direction;
 import skytally.geometry.Rotation;
 import skytally.luminaire.IntensityDistribution;
-import skytally.scene.Lamp;
 import skytally.skyglow.Emission;
 
 /** A lamp as the sky sees it, per lumen: its light by direction in the frame that looks toward one place. */
@@ -18,16 +18,24 @@ final class LampEmission implements Emission {
     private final List<Cone> edges;
 
     /**
+     * @param light             how it spreads its flux
+     * @param attitude          how it hangs
+     * @param heightM           above the ground the air is reckoned from
      * @param bearingToPlaceRad bearing of the place seen from the lamp
      * @param upwardOnly        whether the light below the level is left out, as it is for a lamp out of view
      */
-    LampEmission(Lamp lamp, double bearingToPlaceRad, boolean upwardOnly) {
-        this.light = lamp.light();
-        this.heightM = lamp.position().heightM();
+    LampEmission(
+            IntensityDistribution light,
+            Attitude attitude,
+            double heightM,
+            double bearingToPlaceRad,
+            boolean upwardOnly) {
+        this.light = light;
+        this.heightM = heightM;
         this.upwardOnly = upwardOnly;
         // ahead = (sin β, cos β, 0), left = (−cos β, sin β, 0) in east, north, up
         Rotation frameToWorld = Rotation.aboutZ(Math.PI / 2 - bearingToPlaceRad);
-        Rotation ownToWorld = lamp.attitude().rotation();
+        Rotation ownToWorld = attitude.rotation();
         this.toOwn = ownToWorld.inverse().after(frameToWorld);
         Direction nadir = frameToWorld.inverse().after(ownToWorld).turn(Direction.DOWN);
         List<Cone> cones = new ArrayList<>();

@@ -15,9 +15,11 @@ final class Notes {
     private static final double RODS_FROM_MAG = 4;
 
     private final List<Note> notes = new ArrayList<>();
+    private String place = "";
 
     Notes(List<PlaceNumbers> places) {
         places.forEach(this::of);
+        place = "";
         add(
                 Topic.FIRST_SCATTERING,
                 "Sky glow counts light scattered once only. More scattering adds to it, by about 15 % overhead at 1 km"
@@ -30,19 +32,26 @@ final class Notes {
     }
 
     private void of(PlaceNumbers numbers) {
+        place = numbers.observer().mark();
         double distance = numbers.get(Measure.DISTANCE);
         if (!numbers.path().clearsTheHorizon()) {
             add(
                     Topic.BELOW_HORIZON,
                     "The lights stand below the horizon: the curve of the Earth hides them, and no direct light reaches"
                             + " the eye by this data. Light still arrives from the sky.");
-        } else if (numbers.scene().lamps().stream()
+        } else if (numbers.scene().allLamps().stream()
                 .allMatch(lamp -> lamp.allFlux().lumens() == 0)) {
             add(Topic.NO_LIGHT_AT_ALL, "No light leaves these lamps by this data.");
         } else if (numbers.get(Measure.ILLUMINANCE) == 0) {
             add(
                     Topic.NO_DIRECT_LIGHT,
                     "No direct light reaches here by this data; light still arrives from the ground and the sky.");
+        }
+        if (numbers.hidden() > 0) {
+            add(
+                    Topic.HIDDEN_BY_GROUND,
+                    (numbers.hidden() == 1 ? "One position is" : numbers.hidden() + " positions are")
+                            + " hidden behind the ground heights entered, and counted for nothing here but the sky.");
         }
         if (distance < numbers.brightest().nearestM()) {
             add(
@@ -112,6 +121,6 @@ final class Notes {
     }
 
     private void add(Topic topic, String sentence) {
-        notes.add(new Note(topic, sentence));
+        notes.add(new Note(topic, place, sentence));
     }
 }

@@ -1,10 +1,12 @@
 package skytally.assessment;
 
+import java.util.ArrayList;
 import java.util.Arrays;
+import java.util.Comparator;
+import java.util.LinkedHashMap;
 import java.util.List;
-import java.util.Objects;
+import java.util.Map;
 import java.util.Optional;
-import org.jspecify.annotations.Nullable;
 import skytally.atmosphere.Atmosphere;
 import skytally.atmosphere.DirectPath;
 import skytally.eye.Comparison;
@@ -15,6 +17,8 @@ import skytally.eye.NaturalAnchors;
 import skytally.eye.PointVisibility;
 import skytally.eye.StarCount;
 import skytally.geometry.Direction;
+import skytally.geometry.Position;
+import skytally.glare.ThresholdIncrement;
 import skytally.glare.VeilReach;
 import skytally.glare.VeilingLuminance;
 import skytally.luminaire.FluxShare;
@@ -39,11 +43,15 @@ final class PlaceNumbers {
 
     static final ZeroPoint ZERO_POINT = ZeroPoint.TRADITIONAL;
     static final VeilingLuminance VEIL = VeilingLuminance.CieGeneral.DEFAULT;
+    static final VeilingLuminance ROAD_VEIL = VeilingLuminance.StilesHolladay.IN_STANDARDS;
     /** S/P of sunlight above the air (photometric tables computed for this project). */
     static final double SUN_SCOTOPIC_PHOTOPIC_RATIO = 2.35;
 
     /** Wider than this a bright part is no point and no star is compared with it. */
     static final double WIDEST_STAR_ARCMIN = 5;
+
+    /** Points of a window from edge to edge, both ways. */
+    private static final int PANE_POINTS = 5;
 
     private final Scene scene;
     private final Observer observer;
@@ -52,18 +60,25 @@ final class PlaceNumbers {
     private final double offAxisDeg;
     private final double transmission;
     private final double vacuumLx;
+    private final List<Look> looks;
     private final double[] ofPlace = new double[Measure.values().length];
     private final double[][] ofLooks;
-    private final @Nullable SkyLight[] sky;
+    private final SkyLight[] sky;
+    private final SkyLight[] skyNow;
+    private final Map<String, double[]> byType = new LinkedHashMap<>(); // at the eye, on the window, veil
+    private final int hidden;
+    private final double otherLight;
+    private Position worstOfPane;
 
-    PlaceNumbers(Scene scene, Observer observer) {
-        this.scene = scene;
+    PlaceNumbers(SceneLights lights, Observer observer) {
+        this.scene = lights.scene();
         this.observer = observer;
-        Atmosphere air = air();
+        this.worstOfPane = observer.eye();
+        DirectLight direct = lights.direct();
         DirectLight.Sum sum = new DirectLight.Sum();
-        DirectLight direct = new DirectLight(scene.lamps(), air);
-        direct.at(observer.eye(), observer.facing(), Direction.UP, DirectLight.Veil.NONE, sum);
-        brightest = scene.lamps().get(Math.max(0, sum.brightest()));
+        direct.at(observer, Direction.UP, DirectLight.Veil.NONE, sum);
+        hidden = sum.hidden();
+        brightest = brightest(sum);
         path = DirectPath.between(
                 brightest.position().heightM(),
                 observer.eye().heightM(),
@@ -72,8 +87,11 @@ final class PlaceNumbers {
         Direction own = brightest.attitude().rotation().turnBack(toEye);
         offAxisDeg = StrictMath.toDegrees(own.angleTo(Direction.DOWN));
         double intensity = brightest.flux().lumens() * brightest.light().perLumen(own.x(), own.y(), own.z());
-        vacuumLx = path.clearsTheHorizon() ? intensity / (path.lengthM() * path.lengthM()) : 0;
-        transmission = new LuminousTransmission(brightest.spectrum(), air).along(path, air);
+        boolean inView = sum.brightest() >= 0
+                && path.clearsTheHorizon()
+                && !observer.ground().hides(brightest.position(), observer.eye());
+        vacuumLx = inView ? intensity / (path.lengthM() * path.lengthM()) : 0;
+        transmission = new LuminousTransmission(brightest.spectrum(), air()).along(path, air());
 
         Arrays.fill(ofPlace, Double.NaN);
         set(Measure.DISTANCE, path.lengthM());
@@ -82,27 +100,113 @@ final class PlaceNumbers {
         set(Measure.ONE_ILLUMINANCE, sum.brightestLx());
         set(Measure.ILLUMINANCE, sum.seenLx());
         set(Measure.WINDOW_ILLUMINANCE, sum.windowLx());
+        set(Measure.LEVEL_ILLUMINANCE, sum.levelLx());
         setMagnitudes(sum, new LuminousIntensity(intensity));
         set(Measure.ANGULAR_SIZE, arcminutes(brightest.luminousSizeM(), path.lengthM()));
         set(Measure.UPWARD_SHARE, 100 * FluxShare.upward(brightest.light(), brightest.attitude()));
         set(Measure.LOW_SHARE, 100 * FluxShare.low(brightest.light(), brightest.attitude()));
+        scene.allLamps().forEach(lamp -> byType.putIfAbsent(lamp.type(), new double[] {0, 0, Double.NaN}));
+        for (int i = 0; i < direct.types().size(); i++) {
+            byType.put(direct.types().get(i), new double[] {sum.seenLx(i), sum.windowLx(i), Double.NaN});
+        }
+        setPlanes(direct);
 
-        List<Look> looks = observer.looks();
+        looks = aimed(observer.looks(), direct);
         ofLooks = new double[looks.size()][];
         sky = new SkyLight[looks.size()];
+        skyNow = new SkyLight[looks.size()];
+        SceneLights.Sky over = lights.over(observer.eye());
+        otherLight = otherLight(over);
         for (int i = 0; i < looks.size(); i++) {
-            Look look = looks.get(i);
             double[] numbers = new double[Measure.values().length];
             Arrays.fill(numbers, Double.NaN);
-            sky[i] = SkyLight.along(look, observer.eye(), scene);
-            if (look.purpose() == Look.Purpose.GLARE) {
-                direct.at(observer.eye(), observer.facing(), look.direction(), PlaceNumbers::veilPerLux, sum);
-                glare(numbers, look, sum, sky[i]);
-            } else {
-                sky(numbers, look, sky[i]);
-            }
             ofLooks[i] = numbers;
+            look(i, over, direct, sum);
         }
+    }
+
+    private void look(int i, SceneLights.Sky over, DirectLight direct, DirectLight.Sum sum) {
+        Look look = looks.get(i);
+        sky[i] = SkyLight.NONE;
+        skyNow[i] = SkyLight.NONE;
+        switch (look.purpose()) {
+            case GLARE -> {
+                sky[i] = over.along(look);
+                direct.at(observer, look.direction(), PlaceNumbers::veilPerLux, sum);
+                glare(ofLooks[i], look, sum, sky[i]);
+                for (int type = 0; type < direct.types().size(); type++) {
+                    byTypeOf(direct.types().get(type))[2] = sum.veilCdM2(type);
+                }
+            }
+            case ROAD -> {
+                direct.at(observer, look.direction(), PlaceNumbers::roadVeilPerLux, sum);
+                road(ofLooks[i], sum);
+            }
+            case SKY -> {
+                sky[i] = over.along(look);
+                skyNow[i] = over.atPresent(look);
+                sky(ofLooks[i], look, sky[i]);
+                if (scene.present().isPresent()) {
+                    present(ofLooks[i], look, sky[i], skyNow[i]);
+                }
+            }
+        }
+    }
+
+    /** The lamp that gives the eye most; the nearest where none gives anything. */
+    private Lamp brightest(DirectLight.Sum sum) {
+        if (sum.brightest() >= 0) {
+            return scene.lamps().get(sum.brightest());
+        }
+        return scene.allLamps().stream()
+                .min(Comparator.comparingDouble(lamp -> lamp.position().groundDistanceTo(observer.eye())))
+                .orElseThrow(() -> new IllegalArgumentException("A scene without lamps gives no place anything"));
+    }
+
+    /**
+     * The direction beside the lights is level and 10° beside the brightest lamp, on the side where the veil is the
+     * weaker: among many lamps the other side may run straight into one.
+     */
+    private List<Look> aimed(List<Look> asked, DirectLight direct) {
+        List<Look> aimed = new ArrayList<>();
+        for (Look look : asked) {
+            boolean among = look.id().equals(Look.BESIDE) && scene.lamps().size() > 1;
+            aimed.add(among ? new Look(look.id(), look.purpose(), beside(direct)) : look);
+        }
+        return List.copyOf(aimed);
+    }
+
+    private Direction beside(DirectLight direct) {
+        double toLamp = observer.eye().bearingTo(brightest.position());
+        Direction right = Direction.toward(toLamp + Look.BESIDE_RAD, 0);
+        Direction left = Direction.toward(toLamp - Look.BESIDE_RAD, 0);
+        return veil(direct, left) < veil(direct, right) ? left : right;
+    }
+
+    private double veil(DirectLight direct, Direction look) {
+        DirectLight.Sum sum = new DirectLight.Sum();
+        direct.at(observer, look, PlaceNumbers::veilPerLux, sum);
+        return sum.veilCdM2();
+    }
+
+    private void setPlanes(DirectLight direct) {
+        UprightPlane plane = direct.brightestPlane(observer);
+        set(Measure.WORST_PLANE, plane.illuminanceLx());
+        if (plane.illuminanceLx() > 0) {
+            set(Measure.WORST_PLANE_FACING, plane.facingDeg());
+        }
+        observer.pane().ifPresent(pane -> {
+            DirectLight.Sum sum = new DirectLight.Sum();
+            double most = -1;
+            for (Position point : Panes.points(observer, pane, PANE_POINTS)) {
+                direct.at(observer.at(point), Direction.UP, DirectLight.Veil.NONE, sum);
+                if (sum.windowLx() > most) {
+                    most = sum.windowLx();
+                    worstOfPane = point;
+                }
+            }
+            set(Measure.WINDOW_WORST, most);
+        });
     }
 
     private void setMagnitudes(DirectLight.Sum sum, LuminousIntensity intensity) {
@@ -158,11 +262,17 @@ final class PlaceNumbers {
         }
     }
 
+    private void road(double[] numbers, DirectLight.Sum sum) {
+        numbers[Measure.ROAD_VEIL.ordinal()] = sum.veilInVacuumCdM2();
+        observer.roadLuminanceCdM2()
+                .ifPresent(adapted -> numbers[Measure.THRESHOLD_INCREMENT.ordinal()] =
+                        ThresholdIncrement.percent(new Luminance(sum.veilInVacuumCdM2()), new Luminance(adapted)));
+    }
+
     private void sky(double[] numbers, Look look, SkyLight light) {
         NaturalBackground natural = natural();
-        double zenithAngle = Math.min(90, look.zenithAngleDeg());
-        double naturalV = natural.johnsonVRadianceAt(zenithAngle);
-        double ratio = light.johnsonV() / naturalV;
+        double zenithAngle = zenithAngleDeg(look);
+        double ratio = light.johnsonV() / natural.johnsonVRadianceAt(zenithAngle);
         double before = natural.brightnessAt(zenithAngle).magArcsec2();
         double after = before - NaturalBackground.brighteningMag(ratio);
         numbers[Measure.SKY_ARTIFICIAL.ordinal()] = light.artificialCdM2();
@@ -175,6 +285,49 @@ final class PlaceNumbers {
         numbers[Measure.LIMIT.ordinal()] = faintestStar(after);
         numbers[Measure.STARS_NATURAL.ordinal()] = starsAbove(faintestStar(before));
         numbers[Measure.STARS.ordinal()] = starsAbove(faintestStar(after));
+    }
+
+    /**
+     * The sky as it is, and the sky with the lights over it. A reading overhead tells how much light there is beside
+     * nature and the lamps that were entered; the same share of the natural sky is taken everywhere.
+     */
+    private void present(double[] numbers, Look look, SkyLight after, SkyLight now) {
+        NaturalBackground natural = natural();
+        double zenithAngle = zenithAngleDeg(look);
+        double naturalV = natural.johnsonVRadianceAt(zenithAngle);
+        double presentRatio = otherLight + now.johnsonV() / naturalV;
+        double afterRatio = otherLight + after.johnsonV() / naturalV;
+        double naturalMag = numbers[Measure.SKY_NATURAL_BRIGHTNESS.ordinal()];
+        double naturalCdM2 = numbers[Measure.SKY_NATURAL.ordinal()];
+        double present = naturalMag - NaturalBackground.brighteningMag(presentRatio);
+        double with = naturalMag - NaturalBackground.brighteningMag(afterRatio);
+        numbers[Measure.SKY_PRESENT.ordinal()] = naturalCdM2 * (1 + otherLight) + now.artificialCdM2();
+        numbers[Measure.SKY_LUMINANCE.ordinal()] = naturalCdM2 * (1 + otherLight) + after.artificialCdM2();
+        numbers[Measure.SKY_PRESENT_BRIGHTNESS.ordinal()] = present;
+        numbers[Measure.SKY_BRIGHTNESS.ordinal()] = with;
+        numbers[Measure.SKY_INCREASE_OVER_PRESENT.ordinal()] = 100 * (afterRatio - presentRatio) / (1 + presentRatio);
+        numbers[Measure.LIMIT_PRESENT.ordinal()] = faintestStar(present);
+        numbers[Measure.LIMIT.ordinal()] = faintestStar(with);
+        numbers[Measure.STARS_PRESENT.ordinal()] = starsAbove(faintestStar(present));
+        numbers[Measure.STARS.ordinal()] = starsAbove(faintestStar(with));
+    }
+
+    /** Light of towns and the like in natural skies, as a reading overhead leaves it; 0 where there is no reading. */
+    private double otherLight(SceneLights.Sky over) {
+        return scene.present().stream()
+                .flatMapToDouble(present -> present.zenithMagArcsec2().stream())
+                .map(reading -> {
+                    NaturalBackground natural = natural();
+                    double all = StrictMath.pow(10, 0.4 * (natural.zenith().magArcsec2() - reading)) - 1;
+                    Look zenith = new Look(Look.ZENITH, Look.Purpose.SKY, Direction.UP);
+                    return Math.max(0, all - over.atPresent(zenith).johnsonV() / natural.johnsonVRadianceAt(0));
+                })
+                .findFirst()
+                .orElse(0);
+    }
+
+    private static double zenithAngleDeg(Look look) {
+        return Math.min(90, look.zenithAngleDeg());
     }
 
     /** The faintest star at the eye on a sky of this brightness, no lamp in view, to the typical observer. */
@@ -201,6 +354,13 @@ final class PlaceNumbers {
         return inside > VeilingLuminance.WIDEST_PRINTED_DEG + 1e-9 ? 0 : VEIL.perLux(inside);
     }
 
+    /** The veil of one lux facing the lamp, in the plane of a driver's eye; none outside the angles standards use. */
+    private static double roadVeilPerLux(double angleDeg) {
+        return ROAD_VEIL.validity().contains(angleDeg)
+                ? ROAD_VEIL.perLux(angleDeg) * StrictMath.cos(StrictMath.toRadians(angleDeg))
+                : 0;
+    }
+
     private void set(Measure measure, double value) {
         ofPlace[measure.ordinal()] = value;
     }
@@ -213,19 +373,55 @@ final class PlaceNumbers {
         return ofLooks[look][measure.ordinal()];
     }
 
-    /** A number of the direction with this id; NaN where the place has none of it. */
-    double inLook(String id, Measure measure) {
-        List<Look> looks = observer.looks();
-        for (int i = 0; i < looks.size(); i++) {
-            if (looks.get(i).id().equals(id)) {
-                return get(measure, i);
-            }
+    private double[] byTypeOf(String type) {
+        double[] found = byType.get(type);
+        if (found == null) {
+            throw new IllegalArgumentException("No lamp is of type " + type);
         }
-        return Double.NaN;
+        return found;
+    }
+
+    /** What each type adds, in the order of the lamps. */
+    List<Contribution> contributions() {
+        List<Contribution> contributions = new ArrayList<>();
+        byType.forEach((type, sums) -> {
+            Map<String, Double> bySky = new LinkedHashMap<>();
+            for (int i = 0; i < looks.size(); i++) {
+                if (looks.get(i).purpose() == Look.Purpose.SKY) {
+                    bySky.put(looks.get(i).id(), sky[i].byTypeCdM2().getOrDefault(type, 0.0));
+                }
+            }
+            contributions.add(new Contribution(observer.mark(), type, sums[0], sums[1], sums[2], bySky));
+        });
+        return contributions;
+    }
+
+    /** Other light of the present sky in natural skies. */
+    double otherLight() {
+        return otherLight;
     }
 
     SkyLight sky(int look) {
-        return Objects.requireNonNull(sky[look]);
+        return sky[look];
+    }
+
+    SkyLight skyNow(int look) {
+        return skyNow[look];
+    }
+
+    /** The directions looked in, as they were aimed. */
+    List<Look> looks() {
+        return looks;
+    }
+
+    /** Positions of lamps that the entered ground hides. */
+    int hidden() {
+        return hidden;
+    }
+
+    /** The point of the window that gets most. */
+    Position worstOfPane() {
+        return worstOfPane;
     }
 
     /** The natural sky of 22.0 on the visual scale, with which a veil in the eye is compared. */

@@ -17,11 +17,14 @@ import skytally.luminaire.Shape;
 import skytally.luminaire.Shapes;
 import skytally.photometry.LuminousFlux;
 import skytally.project.Field.Subject;
+import skytally.scene.GroundLine;
 import skytally.scene.Known;
 import skytally.scene.Lamp;
 import skytally.scene.Look;
 import skytally.scene.Observer;
 import skytally.scene.OpenScene;
+import skytally.scene.Pane;
+import skytally.scene.Present;
 import skytally.scene.Property;
 import skytally.scene.Scene;
 import skytally.scene.Surroundings;
@@ -32,18 +35,27 @@ import skytally.spectrum.SpectralClasses;
  * height and tilt come before its type's, and what is not known is stood in for by the catalogue.
  *
  * <p>Heights are reckoned from the lowest ground of any light or place, so that none is negative. Existing lights stay
- * unless they are marked as removed. A type without lumens and without watts is left out and named; a light without a
- * position stands at the reference point and is named.
+ * unless they are marked as removed. A type without lumens and without watts, or without a count and a position, is left
+ * out and named; a light without a position counts for the sky alone, from the middle of the site, and is named.
  */
 public final class SceneDrawing {
 
     private static final double GLARE_ANGLE_RAD = Math.toRadians(10);
     private static final double LOW_SKY_RAD = Math.toRadians(30);
+    /** A driver looks this far below the level (CIE 140 and EN 13201-3, from memory). */
+    private static final double ROAD_DIP_RAD = Math.toRadians(1);
+
+    /** Before the mark of a type that is there already, beside the types of a scheme. */
+    public static final String EXISTING = "existing-";
+
+    private static final List<String> COMPASS = List.of("north", "east", "south", "west");
 
     private final Project project;
     private final Period period;
     private final double baseM;
     private final List<Lamp> lamps = new ArrayList<>();
+    private final List<Lamp> adrift = new ArrayList<>();
+    private final List<Lamp> present = new ArrayList<>();
     private final List<String> leftOut = new ArrayList<>();
     private final List<String> unplaced = new ArrayList<>();
     private final Map<String, Map<Property, Known>> known = new HashMap<>();
@@ -64,11 +76,11 @@ public final class SceneDrawing {
         this.project = project;
         this.period = period;
         this.baseM = lowestGroundM(project, scheme);
-        draw(scheme, false);
+        draw(scheme);
         if (scheme.kind() != Scheme.Kind.EXISTING) {
             project.schemes().stream()
                     .filter(other -> other.kind() == Scheme.Kind.EXISTING)
-                    .forEach(existing -> draw(existing, true));
+                    .forEach(this::drawBeside);
         }
     }
 
@@ -81,10 +93,21 @@ public final class SceneDrawing {
      */
     public record Drawn(OpenScene scene, List<String> leftOut, List<String> unplaced) {}
 
-    /** The scene of one scheme in one period of the night. */
+    /** The scene of one scheme in one period of the night, in the air the project states. */
     public static Drawn of(Project project, Scheme scheme, Period period) {
+        return of(project, scheme, period, Optional.empty());
+    }
+
+    /** The same in another air. */
+    public static Drawn of(Project project, Scheme scheme, Period period, Optional<Clearness> air) {
         SceneDrawing drawing = new SceneDrawing(project, scheme, period);
-        Scene scene = new Scene(drawing.lamps, drawing.observers(), drawing.surroundings());
+        Scene scene = new Scene(
+                drawing.lamps,
+                drawing.adrift,
+                drawing.observers(),
+                drawing.surroundings(air),
+                Optional.of(drawing.present()),
+                List.of());
         return new Drawn(drawing.open(scene), List.copyOf(drawing.leftOut), List.copyOf(drawing.unplaced));
     }
 
@@ -128,39 +151,63 @@ public final class SceneDrawing {
         return Math.min(site, Math.min(lights0, places));
     }
 
-    private void draw(Scheme scheme, boolean asExisting) {
-        Map<String, List<Placement>> byType = new HashMap<>();
-        scheme.placements()
-                .forEach(light -> byType.computeIfAbsent(light.type(), type -> new ArrayList<>())
-                        .add(light));
+    /** The lights of one type, as far as it can be reckoned with. */
+    private record Drawing(List<Lamp> placed, List<Lamp> adrift) {
+
+        static final Drawing NOTHING = new Drawing(List.of(), List.of());
+    }
+
+    private void draw(Scheme scheme) {
+        Map<String, List<Placement>> byType = byType(scheme);
         for (LuminaireType type : scheme.types()) {
-            boolean removed = type.values().text("fate").equals("removed");
-            if (!(asExisting && removed)) {
-                draw(type, byType.getOrDefault(type.mark(), List.of()), asExisting);
+            Drawing drawn = drawn(type, type.mark(), byType.getOrDefault(type.mark(), List.of()));
+            lamps.addAll(drawn.placed());
+            adrift.addAll(drawn.adrift());
+            if (scheme.kind() == Scheme.Kind.EXISTING) {
+                present.addAll(drawn.placed());
+                present.addAll(drawn.adrift());
             }
         }
     }
 
-    private void draw(LuminaireType type, List<Placement> lights, boolean asExisting) {
-        Optional<Reading> lumens = lumens(type.values());
-        if (lumens.isEmpty()) {
-            leftOut.add(type.mark());
-            return;
+    /** What is there now, under marks of its own beside a scheme; it stays unless it is marked as removed. */
+    private void drawBeside(Scheme existing) {
+        Map<String, List<Placement>> byType = byType(existing);
+        for (LuminaireType type : existing.types()) {
+            Drawing drawn = drawn(type, EXISTING + type.mark(), byType.getOrDefault(type.mark(), List.of()));
+            present.addAll(drawn.placed());
+            present.addAll(drawn.adrift());
+            if (!type.values().text("fate").equals("removed")) {
+                lamps.addAll(drawn.placed());
+                adrift.addAll(drawn.adrift());
+            }
         }
-        String mark = asExisting ? "existing-" + type.mark() : type.mark();
+    }
+
+    private static Map<String, List<Placement>> byType(Scheme scheme) {
+        Map<String, List<Placement>> byType = new HashMap<>();
+        scheme.placements()
+                .forEach(light -> byType.computeIfAbsent(light.type(), type -> new ArrayList<>())
+                        .add(light));
+        return byType;
+    }
+
+    private Drawing drawn(LuminaireType type, String mark, List<Placement> lights) {
+        Optional<Reading> lumens = lumens(type.values());
+        OptionalDouble stated = number(Subject.TYPE, "count", type.values());
+        if (lumens.isEmpty() || (stated.isEmpty() && lights.isEmpty())) {
+            leftOut.add(mark);
+            return Drawing.NOTHING;
+        }
         LampType drawn = new LampType(mark, type.values(), lumens.get());
         known.put(mark, drawn.states());
-        int count = number(Subject.TYPE, "count", type.values()).stream()
-                .mapToInt(stated -> (int) stated)
-                .findFirst()
-                .orElse(lights.size());
-        for (Placement light : lights) {
-            lamps.add(drawn.hung(light));
+        int count = (int) stated.orElse(lights.size());
+        if (count <= lights.size()) {
+            return new Drawing(lights.stream().map(drawn::hung).toList(), List.of());
         }
-        if (count > lights.size()) {
-            unplaced.add(type.mark());
-            lamps.add(drawn.atReference(count - lights.size()));
-        }
+        unplaced.add(mark);
+        return new Drawing(
+                lights.stream().map(drawn::hung).toList(), List.of(drawn.atCentre(count - lights.size())));
     }
 
     /** Lumens as stated, or watts times an efficacy. */
@@ -221,12 +268,14 @@ public final class SceneDrawing {
                     number(Subject.LIGHT, "east", light.values()).orElse(0),
                     number(Subject.LIGHT, "north", light.values()).orElse(0),
                     ground - baseM + own(light, "mountingHeight"));
-            return lamp(light.mark(), 1, at, attitude(light.values()));
+            return lamp(light.mark(), 1, at, ground - baseM, attitude(light.values()));
         }
 
-        Lamp atReference(int count) {
-            double height = siteGroundM() - baseM + required("mountingHeight").number();
-            return lamp(mark + "-unplaced", count, new Position(0, 0, height), attitude(Values.NONE));
+        Lamp atCentre(int count) {
+            double ground = siteGroundM() - baseM;
+            Position at =
+                    new Position(0, 0, ground + required("mountingHeight").number());
+            return lamp(mark + "-unplaced", count, at, ground, attitude(Values.NONE));
         }
 
         private Attitude attitude(Values own) {
@@ -244,13 +293,14 @@ public final class SceneDrawing {
                     .orElse(required(field).number());
         }
 
-        private Lamp lamp(String lampMark, int count, Position at, Attitude attitude) {
+        private Lamp lamp(String lampMark, int count, Position at, double groundM, Attitude attitude) {
             double size = number(Subject.TYPE, "luminousSize", values).orElse(shape.luminousSizeM());
             return new Lamp(
                     lampMark,
                     mark,
                     count,
                     at,
+                    groundM,
                     attitude,
                     new LuminousFlux(
                             lumens.number() * required(period.outputField).number() / 100),
@@ -265,14 +315,16 @@ public final class SceneDrawing {
         return number(Subject.SITE, "groundHeight", project.site()).orElse(0);
     }
 
-    private Surroundings surroundings() {
+    private Surroundings surroundings(Optional<Clearness> chosen) {
         Reading air = Reading.of(Subject.SITE, "air", project.site()).orElseThrow();
         Reading ground =
                 Reading.of(Subject.SITE, "groundReflectance", project.site()).orElseThrow();
-        Clearness clearness = Clearness.byId(air.text()).orElseThrow();
+        Clearness clearness = chosen.orElseGet(() -> Clearness.byId(air.text()).orElseThrow());
         for (Place place : project.places()) {
             Map<Property, Known> states = known.computeIfAbsent(place.mark(), mark -> new HashMap<>());
-            states.put(Property.AIR, air.known());
+            states.put(
+                    Property.AIR,
+                    chosen.isPresent() ? Known.assumed("the air chosen for this page") : air.known());
             states.put(Property.GROUND, ground.known());
         }
         return new Surroundings(
@@ -305,13 +357,49 @@ public final class SceneDrawing {
         looks.add(new Look(Look.BESIDE, Look.Purpose.GLARE, Direction.toward(toSite + GLARE_ANGLE_RAD, 0)));
         looks.add(new Look(Look.ZENITH, Look.Purpose.SKY, Direction.UP));
         looks.add(new Look(Look.TOWARD_SITE, Look.Purpose.SKY, Direction.toward(toSite, LOW_SKY_RAD)));
+        for (int i = 0; i < COMPASS.size(); i++) {
+            looks.add(new Look(COMPASS.get(i), Look.Purpose.SKY, Direction.toward(i * Math.PI / 2, LOW_SKY_RAD)));
+        }
         for (Place.NamedLook look : place.looks()) {
             looks.add(new Look(
                     look.name(),
                     Look.Purpose.SKY,
                     Direction.toward(Math.toRadians(look.bearingDeg()), Math.toRadians(look.altitudeDeg()))));
         }
-        return new Observer(place.mark(), at, Direction.toward(facing, 0), looks);
+        if (place.values().text("kind").equals("road-user")) {
+            looks.add(new Look(Look.TRAVEL, Look.Purpose.ROAD, Direction.toward(facing, -ROAD_DIP_RAD)));
+        }
+        return new Observer(
+                place.mark(),
+                at,
+                Direction.toward(facing, 0),
+                looks,
+                pane(place.values()),
+                roadLuminance(place.values()),
+                GroundLine.OPEN);
+    }
+
+    private static Optional<Pane> pane(Values values) {
+        OptionalDouble width = number(Subject.PLACE, "width", values);
+        OptionalDouble height = number(Subject.PLACE, "height", values);
+        return width.isPresent() && height.isPresent()
+                ? Optional.of(new Pane(width.getAsDouble(), height.getAsDouble()))
+                : Optional.empty();
+    }
+
+    /** As stated, or by the class of the road. */
+    private static OptionalDouble roadLuminance(Values values) {
+        OptionalDouble stated = number(Subject.PLACE, "adaptationLuminance", values);
+        return stated.isPresent()
+                ? stated
+                : RoadClass.byId(values.text("roadClass")).stream()
+                        .mapToDouble(RoadClass::adaptationCdM2)
+                        .findFirst();
+    }
+
+    /** The lamps that are there, kept or not, and what was read of the sky. */
+    private Present present() {
+        return new Present(present, number(Subject.SITE, "existingZenithBrightness", project.site()));
     }
 
     private static OptionalDouble number(Subject subject, String field, Values values) {

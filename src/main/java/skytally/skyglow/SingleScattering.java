@@ -1,6 +1,9 @@
 package skytally.skyglow;
 
 import java.util.Arrays;
+import java.util.LinkedHashSet;
+import java.util.List;
+import java.util.Set;
 import org.hipparchus.analysis.integration.gauss.GaussIntegrator;
 import org.hipparchus.analysis.integration.gauss.GaussIntegratorFactory;
 import skytally.atmosphere.Aerosol;
@@ -27,6 +30,10 @@ public final class SingleScattering {
     private static final int NODES = 12;
     /** Longest stretch of y that one set of nodes covers. */
     private static final double PANEL = 2.4;
+    /** The same where edges are not cut at. */
+    private static final double SHORT_PANEL = 0.6;
+
+    private static final int MOST_EDGES = 12;
 
     private static final double[] NODE = new double[NODES];
     private static final double[] WEIGHT = new double[NODES];
@@ -73,15 +80,32 @@ public final class SingleScattering {
      *     to get W/(m² sr) out, cd in to get cd/m² out
      */
     public double[] radiance(Emission light, Sightline line) {
-        double[] sum = new double[molecularDepth.length];
-        new Line(light, line).addTo(sum);
-        return sum;
+        return radiance(List.of(light), line)[0];
+    }
+
+    /**
+     * Radiance of several lights at one point along the same line of sight, for each light and wavelength. The air is
+     * worked out once for all of them.
+     *
+     * <p>With more edges than a line is worth cutting at, the pieces are made shorter instead.
+     *
+     * @param lights at one height
+     * @return as {@link #radiance(Emission, Sightline)}, light by light
+     */
+    public double[][] radiance(List<? extends Emission> lights, Sightline line) {
+        double[][] sums = new double[lights.size()][molecularDepth.length];
+        new Line(lights.toArray(Emission[]::new), line).addTo(sums);
+        return sums;
     }
 
     /** One line of sight in the frame of the light: x level toward the viewer, y to the left, z up. */
     private final class Line {
 
-        private final Emission light;
+        private final Emission[] lights;
+        private final List<Emission.Cone> edges;
+        private final double panel;
+        private final double[] strength;
+        private final double[] passed;
         private final double lightHeight;
         private final double eyeHeight;
         private final double moleculesAtLight; // densities, 1 at the ground
@@ -98,9 +122,21 @@ public final class SingleScattering {
         private final double nearestDistance;
         private final double end;
 
-        Line(Emission light, Sightline line) {
-            this.light = light;
-            lightHeight = light.heightM();
+        Line(Emission[] lights, Sightline line) {
+            this.lights = lights;
+            lightHeight = lights[0].heightM();
+            strength = new double[lights.length];
+            passed = new double[molecularDepth.length];
+            Set<Emission.Cone> distinct = new LinkedHashSet<>();
+            for (Emission light : lights) {
+                if (light.heightM() != lightHeight) {
+                    throw new IllegalArgumentException("Lights at one point are at one height");
+                }
+                distinct.addAll(light.edges());
+            }
+            boolean worthCutting = distinct.size() <= MOST_EDGES;
+            edges = worthCutting ? List.copyOf(distinct) : List.of();
+            panel = worthCutting ? PANEL : SHORT_PANEL;
             eyeHeight = line.eyeHeightM();
             moleculesAtLight = ExponentialLayer.density(MOLECULES_HEIGHT, lightHeight);
             hazeAtLight = ExponentialLayer.density(aerosolHeight, lightHeight);
@@ -141,13 +177,13 @@ public final class SingleScattering {
             return -along + Math.sqrt(along * along + top * top - radius * radius);
         }
 
-        void addTo(double[] sum) {
+        void addTo(double[][] sums) {
             double[] cuts = cuts();
             double fromY = yOf(cuts[0]);
             for (int i = 1; i < cuts.length; i++) {
                 double toY = yOf(cuts[i]);
                 if (toY > fromY) {
-                    addPiece(fromY, toY, sum);
+                    addPiece(fromY, toY, sums);
                 }
                 fromY = toY;
             }
@@ -159,8 +195,8 @@ public final class SingleScattering {
             return Math.copySign(Math.log(Math.abs(x) + Math.sqrt(x * x + 1)), x);
         }
 
-        private void addPiece(double fromY, double toY, double[] sum) {
-            int panels = Math.max(1, (int) Math.ceil((toY - fromY) / PANEL));
+        private void addPiece(double fromY, double toY, double[][] sums) {
+            int panels = Math.max(1, (int) Math.ceil((toY - fromY) / panel));
             double half = (toY - fromY) / panels / 2;
             for (int panel = 0; panel < panels; panel++) {
                 double middle = fromY + (2 * panel + 1) * half;
@@ -170,12 +206,12 @@ public final class SingleScattering {
                     double shrunk = 1 / grown;
                     double s = nearest + nearestDistance * (grown - shrunk) / 2;
                     double ds = nearestDistance * (grown + shrunk) / 2 * half * WEIGHT[i];
-                    addPoint(s, ds, sum);
+                    addPoint(s, ds, sums);
                 }
             }
         }
 
-        private void addPoint(double s, double ds, double[] sum) {
+        private void addPoint(double s, double ds, double[][] sums) {
             double x = eyeX + s * viewX;
             double y = s * viewY;
             double z = eyeZ + s * viewZ;
@@ -185,8 +221,12 @@ public final class SingleScattering {
             if (isBehindTheEarth(up, distance)) {
                 return;
             }
-            double intensity = light.toward(x / distance, y / distance, up);
-            if (intensity == 0) {
+            boolean dark = true;
+            for (int k = 0; k < lights.length; k++) {
+                strength[k] = lights[k].toward(x / distance, y / distance, up) / squared * ds;
+                dark &= strength[k] == 0;
+            }
+            if (dark) {
                 return;
             }
             double cosine = (nearest - s) / distance; // light travels S→P, then P→O along −v
@@ -198,11 +238,14 @@ public final class SingleScattering {
             double hazyAir = air(aerosolHeight, s, distance, up, hazeAtLight, hazeThere, hazeAtEye);
             double molecules = moleculesThere / MOLECULES_HEIGHT * Molecules.phase(cosine);
             double haze = hazeThere / aerosolHeight * aerosol.singleScatteringAlbedo() * aerosol.phase(cosine);
-            double geometry = intensity / squared * ds;
-            for (int i = 0; i < sum.length; i++) {
+            for (int i = 0; i < passed.length; i++) {
                 double scattered = molecularDepth[i] * molecules + aerosolDepth[i] * haze;
-                sum[i] +=
-                        geometry * scattered * Math.exp(-molecularDepth[i] * molecularAir - aerosolDepth[i] * hazyAir);
+                passed[i] = scattered * Math.exp(-molecularDepth[i] * molecularAir - aerosolDepth[i] * hazyAir);
+            }
+            for (int k = 0; k < lights.length; k++) {
+                for (int i = 0; i < passed.length; i++) {
+                    sums[k][i] += strength[k] * passed[i];
+                }
             }
         }
 
@@ -232,11 +275,11 @@ public final class SingleScattering {
 
         /** Both ends of the line and every edge of the emission between them, in order. */
         private double[] cuts() {
-            double[] found = new double[2 + 3 * (light.edges().size() + 2)];
+            double[] found = new double[2 + 3 * (edges.size() + 2)];
             int count = 0;
             found[count++] = 0;
             found[count++] = end;
-            for (Emission.Cone edge : light.edges()) {
+            for (Emission.Cone edge : edges) {
                 count = addCuts(edge, found, count);
             }
             count = addCuts(Emission.Cone.aboutZenith(0), found, count);

@@ -16,6 +16,8 @@ import skytally.luminaire.FluxShare;
 import skytally.scene.Lamp;
 import skytally.scene.Look;
 import skytally.scene.Observer;
+import skytally.scene.Scene;
+import skytally.scene.Surroundings;
 
 @DisplayName("Sky light of a scene")
 class SkyLightTest {
@@ -25,7 +27,7 @@ class SkyLightTest {
     private static final Look TOWARD_SITE = HERE.looks().get(2);
 
     private static SkyLight along(Look look, List<Lamp> lamps) {
-        return SkyLight.along(look, HERE.eye(), TestScenes.scene(lamps, HERE));
+        return new SceneLights(TestScenes.scene(lamps, HERE)).over(HERE.eye()).along(look);
     }
 
     @Test
@@ -86,11 +88,10 @@ class SkyLightTest {
 
     @Test
     void darkGroundSendsNothingBack() {
-        SkyLight onlyLamp = SkyLight.along(
-                ZENITH,
-                HERE.eye(),
-                new skytally.scene.Scene(
-                        TestScenes.town(3), List.of(HERE), new skytally.scene.Surroundings(TestScenes.CLEAR, 0)));
+        SkyLight onlyLamp = new SceneLights(new Scene(
+                        TestScenes.town(3), List.of(HERE), new Surroundings(TestScenes.CLEAR, 0)))
+                .over(HERE.eye())
+                .along(ZENITH);
         assertThat(onlyLamp.groundCdM2()).isZero();
         assertThat(onlyLamp.lampsCdM2()).isPositive();
     }
@@ -110,7 +111,9 @@ class SkyLightTest {
         Lamp lamp = TestScenes.lamp("all-round", 5000, new Position(0, 0, 10));
         double angle = Math.toRadians(angleDeg);
         Look beside = new Look(Look.BESIDE, Look.Purpose.GLARE, Direction.toward(Math.PI, angle));
-        double halo = SkyLight.along(beside, eye, TestScenes.scene(List.of(lamp), HERE))
+        double halo = new SceneLights(TestScenes.scene(List.of(lamp), HERE))
+                .over(eye)
+                .along(beside)
                 .lampsCdM2();
         DirectLight.Sum sum = new DirectLight.Sum();
         new DirectLight(List.of(lamp), TestScenes.CLEAR)

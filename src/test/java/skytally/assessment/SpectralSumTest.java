@@ -43,8 +43,8 @@ class SpectralSumTest {
             SingleScattering every = new SingleScattering(air, nodes);
             for (Sightline line : LINES) {
                 double bound = line.groundDistanceM() > 10_000 ? 2.5e-3 : 4e-4;
-                double[] kernel = six.radiance(new GroundEmission(), line);
-                double[] exact = every.radiance(new GroundEmission(), line);
+                double[] kernel = six.radiance(new GroundEmission(0), line);
+                double[] exact = every.radiance(new GroundEmission(0), line);
                 double luminance = mean(exact, spectrum.nodeWeights(Passband.PHOTOPIC));
                 double johnsonV =
                         mean(exact, spectrum.nodeWeights(Passband.JOHNSON_V)) * spectrum.johnsonVFluxDensityPerLux();
