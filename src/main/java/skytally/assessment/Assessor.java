@@ -29,7 +29,12 @@ public final class Assessor {
 
     /** Assesses an open scene, likely values first. */
     public Assessment assess(OpenScene open) {
-        return new Run(open).assessment();
+        return assess(open, Scope.ALL);
+    }
+
+    /** The same for a part of it. */
+    public Assessment assess(OpenScene open, Scope scope) {
+        return new Run(open, scope).assessment();
     }
 
     /** One number of one place, by its measure and its direction; −1 for the place as a whole. */
@@ -38,11 +43,13 @@ public final class Assessor {
     private final class Run {
 
         private final OpenScene open;
+        private final Scope scope;
         private final Map<Map<String, End>, List<PlaceNumbers>> drawn = new HashMap<>();
         private final List<PlaceNumbers> likely;
 
-        Run(OpenScene open) {
+        Run(OpenScene open, Scope scope) {
             this.open = open;
+            this.scope = scope;
             this.likely = at(Map.of());
         }
 
@@ -54,10 +61,24 @@ public final class Assessor {
         private List<PlaceNumbers> places(Scene scene) {
             SceneLights lights = new SceneLights(scene);
             List<Observer> observers = new ArrayList<>(scene.observers());
-            PropertyLine.of(scene).worstPoint(lights.direct()).ifPresent(observers::add);
+            if (scope.isWanted(Assessment.PROPERTY_LINE)) {
+                PropertyLine.of(scene).worstPoint(lights.direct()).ifPresent(observers::add);
+            }
+            observers.removeIf(observer -> !scope.isWanted(observer.mark()));
             return observers.parallelStream()
-                    .map(observer -> new PlaceNumbers(lights, observer))
+                    .map(observer -> {
+                        PlaceNumbers numbers = new PlaceNumbers(lights, observer);
+                        contributions(numbers); // here, while there are several processors for it
+                        return numbers;
+                    })
                     .toList();
+        }
+
+        private List<Contribution> contributions(PlaceNumbers place) {
+            return scope.isInFull(place.observer().mark())
+                    ? place.contributions()
+                    : place.contributions(look -> scope.others() == Scope.Others.DIRECT_AND_OVERHEAD
+                            && look.id().equals(Look.ZENITH));
         }
 
         Assessment assessment() {
@@ -75,7 +96,7 @@ public final class Assessor {
                     figures,
                     likenesses(),
                     likely.stream()
-                            .flatMap(place -> place.contributions().stream())
+                            .flatMap(place -> contributions(place).stream())
                             .toList(),
                     eyes,
                     influences,
@@ -96,6 +117,9 @@ public final class Assessor {
         private List<Slot> slots() {
             List<Slot> slots = new ArrayList<>();
             for (int place = 0; place < likely.size(); place++) {
+                if (!scope.isInFull(likely.get(place).observer().mark())) {
+                    continue;
+                }
                 for (Measure measure : Measure.values()) {
                     if (measure.isOf(likely.get(place).observer())) {
                         slots.add(new Slot(place, -1, measure));

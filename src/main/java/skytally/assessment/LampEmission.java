@@ -2,7 +2,6 @@ package skytally.assessment;
 
 import java.util.ArrayList;
 import java.util.List;
-import skytally.geometry.Attitude;
 import skytally.geometry.Direction;
 import skytally.geometry.Rotation;
 import skytally.luminaire.IntensityDistribution;
@@ -18,24 +17,21 @@ final class LampEmission implements Emission {
     private final List<Cone> edges;
 
     /**
-     * @param light             how it spreads its flux
-     * @param attitude          how it hangs
-     * @param heightM           above the ground the air is reckoned from
-     * @param bearingToPlaceRad bearing of the place seen from the lamp
-     * @param upwardOnly        whether the light below the level is left out, as it is for a lamp out of view
+     * @param light        how it spreads its flux
+     * @param ownToWorld   how it hangs
+     * @param heightM      above the ground the air is reckoned from
+     * @param frameToWorld of the place, see {@link #frame}
+     * @param upwardOnly   whether the light below the level is left out, as it is for a lamp out of view
      */
     LampEmission(
             IntensityDistribution light,
-            Attitude attitude,
+            Rotation ownToWorld,
             double heightM,
-            double bearingToPlaceRad,
+            Rotation frameToWorld,
             boolean upwardOnly) {
         this.light = light;
         this.heightM = heightM;
         this.upwardOnly = upwardOnly;
-        // ahead = (sin β, cos β, 0), left = (−cos β, sin β, 0) in east, north, up
-        Rotation frameToWorld = Rotation.aboutZ(Math.PI / 2 - bearingToPlaceRad);
-        Rotation ownToWorld = attitude.rotation();
         this.toOwn = ownToWorld.inverse().after(frameToWorld);
         Direction nadir = frameToWorld.inverse().after(ownToWorld).turn(Direction.DOWN);
         List<Cone> cones = new ArrayList<>();
@@ -44,6 +40,15 @@ final class LampEmission implements Emission {
             cones.add(new Cone(nadir.x(), nadir.y(), nadir.z(), cosine));
         }
         this.edges = List.copyOf(cones);
+    }
+
+    /**
+     * The frame that looks toward a place: ahead = (sin β, cos β, 0), left = (−cos β, sin β, 0) in east, north, up.
+     *
+     * @param bearingToPlaceRad bearing of the place seen from the lamp
+     */
+    static Rotation frame(double bearingToPlaceRad) {
+        return Rotation.aboutZ(Math.PI / 2 - bearingToPlaceRad);
     }
 
     @Override

@@ -3,10 +3,15 @@ package skytally.assessment;
 import java.util.ArrayList;
 import java.util.Arrays;
 import java.util.Comparator;
+import java.util.EnumSet;
 import java.util.LinkedHashMap;
 import java.util.List;
 import java.util.Map;
+import java.util.Objects;
 import java.util.Optional;
+import java.util.Set;
+import java.util.function.Predicate;
+import org.jspecify.annotations.Nullable;
 import skytally.atmosphere.Atmosphere;
 import skytally.atmosphere.DirectPath;
 import skytally.eye.Comparison;
@@ -53,6 +58,10 @@ final class PlaceNumbers {
     /** Points of a window from edge to edge, both ways. */
     private static final int PANE_POINTS = 5;
 
+    private static final Set<Measure> OF_PLANES =
+            EnumSet.of(Measure.WORST_PLANE, Measure.WORST_PLANE_FACING, Measure.WINDOW_WORST);
+
+    private final SceneLights lights;
     private final Scene scene;
     private final Observer observer;
     private final Lamp brightest;
@@ -61,19 +70,21 @@ final class PlaceNumbers {
     private final double transmission;
     private final double vacuumLx;
     private final List<Look> looks;
+    private final SceneLights.Sky over;
     private final double[] ofPlace = new double[Measure.values().length];
-    private final double[][] ofLooks;
-    private final SkyLight[] sky;
-    private final SkyLight[] skyNow;
+    private final @Nullable Looked[] looked;
     private final Map<String, double[]> byType = new LinkedHashMap<>(); // at the eye, on the window, veil
     private final int hidden;
-    private final double otherLight;
-    private Position worstOfPane;
+    private @Nullable Double otherLight;
+    private @Nullable Position worstOfPane;
+
+    /** What one direction gave. */
+    private record Looked(double[] numbers, SkyLight sky, SkyLight skyNow) {}
 
     PlaceNumbers(SceneLights lights, Observer observer) {
+        this.lights = lights;
         this.scene = lights.scene();
         this.observer = observer;
-        this.worstOfPane = observer.eye();
         DirectLight direct = lights.direct();
         DirectLight.Sum sum = new DirectLight.Sum();
         direct.at(observer, Direction.UP, DirectLight.Veil.NONE, sum);
@@ -105,52 +116,52 @@ final class PlaceNumbers {
         set(Measure.ANGULAR_SIZE, arcminutes(brightest.luminousSizeM(), path.lengthM()));
         set(Measure.UPWARD_SHARE, 100 * FluxShare.upward(brightest.light(), brightest.attitude()));
         set(Measure.LOW_SHARE, 100 * FluxShare.low(brightest.light(), brightest.attitude()));
-        scene.allLamps().forEach(lamp -> byType.putIfAbsent(lamp.type(), new double[] {0, 0, Double.NaN}));
+        lights.types().forEach(type -> byType.put(type, new double[] {0, 0, Double.NaN}));
         for (int i = 0; i < direct.types().size(); i++) {
             byType.put(direct.types().get(i), new double[] {sum.seenLx(i), sum.windowLx(i), Double.NaN});
         }
-        setPlanes(direct);
-
+        over = lights.over(observer.eye());
         looks = aimed(observer.looks(), direct);
-        ofLooks = new double[looks.size()][];
-        sky = new SkyLight[looks.size()];
-        skyNow = new SkyLight[looks.size()];
-        SceneLights.Sky over = lights.over(observer.eye());
-        otherLight = otherLight(over);
-        for (int i = 0; i < looks.size(); i++) {
-            double[] numbers = new double[Measure.values().length];
-            Arrays.fill(numbers, Double.NaN);
-            ofLooks[i] = numbers;
-            look(i, over, direct, sum);
-        }
+        looked = new Looked[looks.size()];
     }
 
-    private void look(int i, SceneLights.Sky over, DirectLight direct, DirectLight.Sum sum) {
-        Look look = looks.get(i);
-        sky[i] = SkyLight.NONE;
-        skyNow[i] = SkyLight.NONE;
+    /** What is worked out only when asked for, because it takes long. */
+    private Looked looked(int i) {
+        Looked done = looked[i];
+        if (done == null) {
+            done = look(looks.get(i));
+            looked[i] = done;
+        }
+        return done;
+    }
+
+    private Looked look(Look look) {
+        double[] numbers = new double[Measure.values().length];
+        Arrays.fill(numbers, Double.NaN);
+        DirectLight.Sum sum = new DirectLight.Sum();
         switch (look.purpose()) {
             case GLARE -> {
-                sky[i] = over.along(look);
-                direct.at(observer, look.direction(), PlaceNumbers::veilPerLux, sum);
-                glare(ofLooks[i], look, sum, sky[i]);
-                for (int type = 0; type < direct.types().size(); type++) {
-                    byTypeOf(direct.types().get(type))[2] = sum.veilCdM2(type);
-                }
+                SkyLight halo = over.along(look);
+                lights.direct().at(observer, look.direction(), PlaceNumbers::veilPerLux, sum);
+                glare(numbers, look, sum, halo);
+                return new Looked(numbers, halo, SkyLight.NONE);
             }
             case ROAD -> {
-                direct.at(observer, look.direction(), PlaceNumbers::roadVeilPerLux, sum);
-                road(ofLooks[i], sum);
+                lights.direct().at(observer, look.direction(), PlaceNumbers::roadVeilPerLux, sum);
+                road(numbers, sum);
+                return new Looked(numbers, SkyLight.NONE, SkyLight.NONE);
             }
             case SKY -> {
-                sky[i] = over.along(look);
-                skyNow[i] = over.atPresent(look);
-                sky(ofLooks[i], look, sky[i]);
+                SkyLight sky = over.along(look);
+                SkyLight now = over.atPresent(look);
+                sky(numbers, look, sky);
                 if (scene.present().isPresent()) {
-                    present(ofLooks[i], look, sky[i], skyNow[i]);
+                    present(numbers, look, sky, now);
                 }
+                return new Looked(numbers, sky, now);
             }
         }
+        throw new IllegalStateException("Nothing is asked of " + look);
     }
 
     /** The lamp that gives the eye most; the nearest where none gives anything. */
@@ -170,8 +181,12 @@ final class PlaceNumbers {
     private List<Look> aimed(List<Look> asked, DirectLight direct) {
         List<Look> aimed = new ArrayList<>();
         for (Look look : asked) {
-            boolean among = look.id().equals(Look.BESIDE) && scene.lamps().size() > 1;
-            aimed.add(among ? new Look(look.id(), look.purpose(), beside(direct)) : look);
+            boolean beside = look.id().equals(Look.BESIDE);
+            Direction direction = beside && scene.lamps().size() > 1 ? beside(direct) : look.direction();
+            aimed.add(new Look(look.id(), look.purpose(), direction));
+            if (beside) {
+                keepVeils(direct, veil(direct, direction));
+            }
         }
         return List.copyOf(aimed);
     }
@@ -180,16 +195,24 @@ final class PlaceNumbers {
         double toLamp = observer.eye().bearingTo(brightest.position());
         Direction right = Direction.toward(toLamp + Look.BESIDE_RAD, 0);
         Direction left = Direction.toward(toLamp - Look.BESIDE_RAD, 0);
-        return veil(direct, left) < veil(direct, right) ? left : right;
+        return veil(direct, left).veilCdM2() < veil(direct, right).veilCdM2() ? left : right;
     }
 
-    private double veil(DirectLight direct, Direction look) {
+    private DirectLight.Sum veil(DirectLight direct, Direction look) {
         DirectLight.Sum sum = new DirectLight.Sum();
         direct.at(observer, look, PlaceNumbers::veilPerLux, sum);
-        return sum.veilCdM2();
+        return sum;
     }
 
-    private void setPlanes(DirectLight direct) {
+    private void keepVeils(DirectLight direct, DirectLight.Sum sum) {
+        for (int type = 0; type < direct.types().size(); type++) {
+            byTypeOf(direct.types().get(type))[2] = sum.veilCdM2(type);
+        }
+    }
+
+    private void setPlanes() {
+        DirectLight direct = lights.direct();
+        worstOfPane = observer.eye();
         UprightPlane plane = direct.brightestPlane(observer);
         set(Measure.WORST_PLANE, plane.illuminanceLx());
         if (plane.illuminanceLx() > 0) {
@@ -295,14 +318,15 @@ final class PlaceNumbers {
         NaturalBackground natural = natural();
         double zenithAngle = zenithAngleDeg(look);
         double naturalV = natural.johnsonVRadianceAt(zenithAngle);
-        double presentRatio = otherLight + now.johnsonV() / naturalV;
-        double afterRatio = otherLight + after.johnsonV() / naturalV;
+        double other = otherLight();
+        double presentRatio = other + now.johnsonV() / naturalV;
+        double afterRatio = other + after.johnsonV() / naturalV;
         double naturalMag = numbers[Measure.SKY_NATURAL_BRIGHTNESS.ordinal()];
         double naturalCdM2 = numbers[Measure.SKY_NATURAL.ordinal()];
         double present = naturalMag - NaturalBackground.brighteningMag(presentRatio);
         double with = naturalMag - NaturalBackground.brighteningMag(afterRatio);
-        numbers[Measure.SKY_PRESENT.ordinal()] = naturalCdM2 * (1 + otherLight) + now.artificialCdM2();
-        numbers[Measure.SKY_LUMINANCE.ordinal()] = naturalCdM2 * (1 + otherLight) + after.artificialCdM2();
+        numbers[Measure.SKY_PRESENT.ordinal()] = naturalCdM2 * (1 + other) + now.artificialCdM2();
+        numbers[Measure.SKY_LUMINANCE.ordinal()] = naturalCdM2 * (1 + other) + after.artificialCdM2();
         numbers[Measure.SKY_PRESENT_BRIGHTNESS.ordinal()] = present;
         numbers[Measure.SKY_BRIGHTNESS.ordinal()] = with;
         numbers[Measure.SKY_INCREASE_OVER_PRESENT.ordinal()] = 100 * (afterRatio - presentRatio) / (1 + presentRatio);
@@ -313,7 +337,16 @@ final class PlaceNumbers {
     }
 
     /** Light of towns and the like in natural skies, as a reading overhead leaves it; 0 where there is no reading. */
-    private double otherLight(SceneLights.Sky over) {
+    double otherLight() {
+        Double known = otherLight;
+        if (known == null) {
+            known = readOtherLight();
+            otherLight = known;
+        }
+        return known;
+    }
+
+    private double readOtherLight() {
         return scene.present().stream()
                 .flatMapToDouble(present -> present.zenithMagArcsec2().stream())
                 .map(reading -> {
@@ -366,11 +399,14 @@ final class PlaceNumbers {
     }
 
     double get(Measure measure) {
+        if (worstOfPane == null && OF_PLANES.contains(measure)) {
+            setPlanes();
+        }
         return ofPlace[measure.ordinal()];
     }
 
     double get(Measure measure, int look) {
-        return ofLooks[look][measure.ordinal()];
+        return looked(look).numbers()[measure.ordinal()];
     }
 
     private double[] byTypeOf(String type) {
@@ -381,14 +417,19 @@ final class PlaceNumbers {
         return found;
     }
 
-    /** What each type adds, in the order of the lamps. */
+    /** What each type adds, in the order of the lamps, to the sky in every direction looked in. */
     List<Contribution> contributions() {
+        return contributions(look -> true);
+    }
+
+    /** The same, to the sky in some directions only. */
+    List<Contribution> contributions(Predicate<Look> toSky) {
         List<Contribution> contributions = new ArrayList<>();
         byType.forEach((type, sums) -> {
             Map<String, Double> bySky = new LinkedHashMap<>();
             for (int i = 0; i < looks.size(); i++) {
-                if (looks.get(i).purpose() == Look.Purpose.SKY) {
-                    bySky.put(looks.get(i).id(), sky[i].byTypeCdM2().getOrDefault(type, 0.0));
+                if (looks.get(i).purpose() == Look.Purpose.SKY && toSky.test(looks.get(i))) {
+                    bySky.put(looks.get(i).id(), sky(i).byTypeCdM2().getOrDefault(type, 0.0));
                 }
             }
             contributions.add(new Contribution(observer.mark(), type, sums[0], sums[1], sums[2], bySky));
@@ -396,17 +437,12 @@ final class PlaceNumbers {
         return contributions;
     }
 
-    /** Other light of the present sky in natural skies. */
-    double otherLight() {
-        return otherLight;
-    }
-
     SkyLight sky(int look) {
-        return sky[look];
+        return looked(look).sky();
     }
 
     SkyLight skyNow(int look) {
-        return skyNow[look];
+        return looked(look).skyNow();
     }
 
     /** The directions looked in, as they were aimed. */
@@ -421,7 +457,10 @@ final class PlaceNumbers {
 
     /** The point of the window that gets most. */
     Position worstOfPane() {
-        return worstOfPane;
+        if (worstOfPane == null) {
+            setPlanes();
+        }
+        return Objects.requireNonNull(worstOfPane);
     }
 
     /** The natural sky of 22.0 on the visual scale, with which a veil in the eye is compared. */

@@ -2,6 +2,7 @@ package skytally.assessment;
 
 import java.util.List;
 import skytally.geometry.Position;
+import skytally.scene.Lamp;
 import skytally.scene.Look;
 import skytally.scene.Present;
 import skytally.scene.Scene;
@@ -15,10 +16,12 @@ final class SceneLights {
     private final GatheredLights lamps;
     private final GatheredLights present;
     private final SingleScattering air;
+    private final List<String> types;
 
     SceneLights(Scene scene) {
         this.scene = scene;
         this.direct = new DirectLight(scene.lamps(), scene.surroundings().air());
+        this.types = scene.allLamps().stream().map(Lamp::type).distinct().toList();
         this.lamps = new GatheredLights(scene.allLamps());
         this.present = new GatheredLights(scene.present().map(Present::lamps).orElse(List.of()));
         this.air = new SingleScattering(scene.surroundings().air(), SpectralSum.WAVELENGTHS_NM);
@@ -26,6 +29,11 @@ final class SceneLights {
 
     Scene scene() {
         return scene;
+    }
+
+    /** Marks of all luminaire types, in the order of the lamps. */
+    List<String> types() {
+        return types;
     }
 
     DirectLight direct() {
@@ -41,10 +49,10 @@ final class SceneLights {
     final class Sky {
 
         private final Position eye;
-        private final List<GatheredLights.Light> seen;
-        private final List<GatheredLights.Light> seenNow;
+        private final GatheredLights.View seen;
+        private final GatheredLights.View seenNow;
 
-        private Sky(Position eye, List<GatheredLights.Light> seen, List<GatheredLights.Light> seenNow) {
+        private Sky(Position eye, GatheredLights.View seen, GatheredLights.View seenNow) {
             this.eye = eye;
             this.seen = seen;
             this.seenNow = seenNow;
@@ -59,11 +67,11 @@ final class SceneLights {
             return along(look, seenNow, present);
         }
 
-        private SkyLight along(Look look, List<GatheredLights.Light> lights, GatheredLights all) {
+        private SkyLight along(Look look, GatheredLights.View view, GatheredLights all) {
             return SkyLight.along(
                     look,
                     eye,
-                    lights,
+                    view.along(look.direction()),
                     all.strands(),
                     scene.surroundings().groundReflectance(),
                     air);

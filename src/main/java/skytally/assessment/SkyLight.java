@@ -1,6 +1,5 @@
 package skytally.assessment;
 
-import java.util.ArrayList;
 import java.util.LinkedHashMap;
 import java.util.List;
 import java.util.Map;
@@ -37,37 +36,41 @@ record SkyLight(double lampsCdM2, double groundCdM2, double johnsonV, Map<String
             List<GatheredLights.Strand> strands,
             double groundReflectance,
             SingleScattering air) {
-        double[] lamps = new double[strands.size()];
-        double[] ground = new double[strands.size()];
-        double johnsonV = 0;
-        List<SpectralSum> spectra = new ArrayList<>();
-        strands.forEach(strand -> spectra.add(SpectralSum.of(strand.spectrum())));
+        int wavelengths = SpectralSum.WAVELENGTHS_NM.length;
+        double[][] fromLamps = new double[strands.size()][wavelengths];
+        double[][] fromGround = new double[strands.size()][wavelengths];
         for (GatheredLights.Light light : lights) {
             Sightline line = sightline(look, eye, light.at());
-            double[][] fromLamps = air.radiance(light.emissions(), line);
-            double[] fromGround = air.radiance(new GroundEmission(light.groundHeightM()), line);
-            for (int i = 0; i < fromLamps.length; i++) {
+            double[][] perLumen = air.radiance(light.emissions(), line);
+            double[] perReturned = air.radiance(light.ground(), line)[0];
+            for (int i = 0; i < perLumen.length; i++) {
                 int strand = light.strands()[i];
-                SpectralSum spectrum = spectra.get(strand);
-                double lumens = light.lumens()[i];
-                double returned = light.onGround()[i] * groundReflectance;
-                lamps[strand] += lumens * spectrum.luminance(fromLamps[i]);
-                ground[strand] += returned * spectrum.luminance(fromGround);
-                johnsonV += lumens * spectrum.johnsonV(fromLamps[i]) + returned * spectrum.johnsonV(fromGround);
+                add(light.lumens()[i], perLumen[i], fromLamps[strand]);
+                add(light.onGround()[i] * groundReflectance, perReturned, fromGround[strand]);
             }
         }
-        return of(lamps, ground, johnsonV, strands);
+        return of(fromLamps, fromGround, strands);
     }
 
-    private static SkyLight of(
-            double[] lamps, double[] ground, double johnsonV, List<GatheredLights.Strand> strands) {
+    private static void add(double lumens, double[] perLumen, double[] sum) {
+        for (int i = 0; i < sum.length; i++) {
+            sum[i] += lumens * perLumen[i];
+        }
+    }
+
+    private static SkyLight of(double[][] fromLamps, double[][] fromGround, List<GatheredLights.Strand> strands) {
         Map<String, Double> byType = new LinkedHashMap<>();
         double allLamps = 0;
         double allGround = 0;
-        for (int i = 0; i < lamps.length; i++) {
-            allLamps += lamps[i];
-            allGround += ground[i];
-            byType.merge(strands.get(i).type(), lamps[i] + ground[i], Double::sum);
+        double johnsonV = 0;
+        for (int i = 0; i < strands.size(); i++) {
+            SpectralSum spectrum = SpectralSum.of(strands.get(i).spectrum());
+            double lamps = spectrum.luminance(fromLamps[i]);
+            double ground = spectrum.luminance(fromGround[i]);
+            allLamps += lamps;
+            allGround += ground;
+            johnsonV += spectrum.johnsonV(fromLamps[i]) + spectrum.johnsonV(fromGround[i]);
+            byType.merge(strands.get(i).type(), lamps + ground, Double::sum);
         }
         return new SkyLight(allLamps, allGround, johnsonV, byType);
     }

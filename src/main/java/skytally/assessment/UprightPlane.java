@@ -11,8 +11,8 @@ public record UprightPlane(int facingDeg, double illuminanceLx) {
     private static final int FACINGS = 360;
 
     /**
-     * Finds the brightest plane. A plane gets light from the half circle before it, so with the light of each degree of
-     * bearing added up as a vector, one sum slid around the circle gives all 360 planes without looking at a lamp twice.
+     * Finds the brightest plane. A plane gets light from the half circle before it, so the light of each degree of
+     * bearing, added up as a vector, gives all 360 planes without looking at a lamp twice.
      */
     static final class Search {
 

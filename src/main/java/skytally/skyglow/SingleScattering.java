@@ -1,9 +1,7 @@
 package skytally.skyglow;
 
 import java.util.Arrays;
-import java.util.LinkedHashSet;
 import java.util.List;
-import java.util.Set;
 import org.hipparchus.analysis.integration.gauss.GaussIntegrator;
 import org.hipparchus.analysis.integration.gauss.GaussIntegratorFactory;
 import skytally.atmosphere.Aerosol;
@@ -30,10 +28,6 @@ public final class SingleScattering {
     private static final int NODES = 12;
     /** Longest stretch of y that one set of nodes covers. */
     private static final double PANEL = 2.4;
-    /** The same where edges are not cut at. */
-    private static final double SHORT_PANEL = 0.6;
-
-    private static final int MOST_EDGES = 12;
 
     private static final double[] NODE = new double[NODES];
     private static final double[] WEIGHT = new double[NODES];
@@ -80,21 +74,21 @@ public final class SingleScattering {
      *     to get W/(m² sr) out, cd in to get cd/m² out
      */
     public double[] radiance(Emission light, Sightline line) {
-        return radiance(List.of(light), line)[0];
+        return radiance(new Emissions(List.of(light)), line)[0];
     }
 
     /**
      * Radiance of several lights at one point along the same line of sight, for each light and wavelength. The air is
      * worked out once for all of them.
      *
-     * <p>With more edges than a line is worth cutting at, the pieces are made shorter instead.
+     * <p>Where there are more edges than a line is worth cutting at, it is cut at none: the kinks of many lights even out
+     * to within 2e-4.
      *
-     * @param lights at one height
      * @return as {@link #radiance(Emission, Sightline)}, light by light
      */
-    public double[][] radiance(List<? extends Emission> lights, Sightline line) {
+    public double[][] radiance(Emissions lights, Sightline line) {
         double[][] sums = new double[lights.size()][molecularDepth.length];
-        new Line(lights.toArray(Emission[]::new), line).addTo(sums);
+        new Line(lights, line).addTo(sums);
         return sums;
     }
 
@@ -103,7 +97,6 @@ public final class SingleScattering {
 
         private final Emission[] lights;
         private final List<Emission.Cone> edges;
-        private final double panel;
         private final double[] strength;
         private final double[] passed;
         private final double lightHeight;
@@ -122,21 +115,12 @@ public final class SingleScattering {
         private final double nearestDistance;
         private final double end;
 
-        Line(Emission[] lights, Sightline line) {
-            this.lights = lights;
-            lightHeight = lights[0].heightM();
-            strength = new double[lights.length];
+        Line(Emissions lights, Sightline line) {
+            this.lights = lights.toArray();
+            edges = lights.edgesWorthCutting();
+            lightHeight = lights.heightM();
+            strength = new double[lights.size()];
             passed = new double[molecularDepth.length];
-            Set<Emission.Cone> distinct = new LinkedHashSet<>();
-            for (Emission light : lights) {
-                if (light.heightM() != lightHeight) {
-                    throw new IllegalArgumentException("Lights at one point are at one height");
-                }
-                distinct.addAll(light.edges());
-            }
-            boolean worthCutting = distinct.size() <= MOST_EDGES;
-            edges = worthCutting ? List.copyOf(distinct) : List.of();
-            panel = worthCutting ? PANEL : SHORT_PANEL;
             eyeHeight = line.eyeHeightM();
             moleculesAtLight = ExponentialLayer.density(MOLECULES_HEIGHT, lightHeight);
             hazeAtLight = ExponentialLayer.density(aerosolHeight, lightHeight);
@@ -196,7 +180,7 @@ public final class SingleScattering {
         }
 
         private void addPiece(double fromY, double toY, double[][] sums) {
-            int panels = Math.max(1, (int) Math.ceil((toY - fromY) / panel));
+            int panels = Math.max(1, (int) Math.ceil((toY - fromY) / PANEL));
             double half = (toY - fromY) / panels / 2;
             for (int panel = 0; panel < panels; panel++) {
                 double middle = fromY + (2 * panel + 1) * half;
