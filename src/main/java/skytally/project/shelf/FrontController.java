@@ -24,6 +24,7 @@ import skytally.project.KeptProject;
 import skytally.project.Project;
 import skytally.project.Projects;
 import skytally.project.Saving;
+import skytally.project.entry.WhoCookie;
 import skytally.project.transfer.ProjectFile;
 import skytally.web.InvalidInputException.Fault;
 
@@ -60,7 +61,7 @@ class FrontController {
         page.addObject("holding", Holding.of(kept.project()));
         page.addObject("changed", Ago.of(kept.changedAt(), clock.instant()));
         page.addObject("typedTitle", typedTitle);
-        page.addObject("who", TypedName.last(request));
+        page.addObject("who", WhoCookie.in(request));
         page.addObject("faults", faults);
         if (!faults.isEmpty()) {
             page.setStatus(HttpStatus.BAD_REQUEST);
@@ -93,7 +94,7 @@ class FrontController {
         if (!faults.isEmpty()) {
             return page(kept, title, faults, request);
         }
-        String name = TypedName.taken(who, response);
+        String name = WhoCookie.taken(who, response);
         projects.save(Copies.titled(kept.project(), title.strip()), version, Saving.by(name, say("shelf.why.renamed")));
         return to(kept.project().id(), "renamed");
     }
@@ -102,7 +103,7 @@ class FrontController {
     ModelAndView copy(@PathVariable String id, HttpServletRequest request) {
         Project project = projects.require(id).project();
         Project copy = Copies.titled(Copies.withFreshId(project), Copies.copyTitle(project.title()));
-        projects.add(copy, Saving.by(TypedName.last(request), say("shelf.why.copied")));
+        projects.add(copy, Saving.by(WhoCookie.in(request), say("shelf.why.copied")));
         return to(copy.id(), "copied");
     }
 

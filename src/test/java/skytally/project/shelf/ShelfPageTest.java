@@ -3,7 +3,14 @@ package skytally.project.shelf;
 import static org.assertj.core.api.Assertions.assertThat;
 
 import java.nio.charset.StandardCharsets;
+import java.util.ArrayList;
+import java.util.Collections;
+import java.util.List;
 import java.util.UUID;
+import java.util.concurrent.Callable;
+import java.util.concurrent.ExecutorService;
+import java.util.concurrent.Executors;
+import java.util.concurrent.Future;
 import org.junit.jupiter.api.BeforeEach;
 import org.junit.jupiter.api.DisplayName;
 import org.junit.jupiter.api.Test;
@@ -52,7 +59,8 @@ class ShelfPageTest {
         assertThat(list.body())
                 .contains("/projects/" + front.id(), "just now", "aria-current=\"page\"")
                 .contains("value=\"A. Planner\"");
-        assertThat(projects.history(UUID.fromString(front.id())).get(0).who()).isEqualTo("A. Planner");
+        assertThat(Cases.history(projects, UUID.fromString(front.id())).get(0).who())
+                .isEqualTo("A. Planner");
     }
 
     @Test
@@ -120,7 +128,7 @@ class ShelfPageTest {
         assertThat(list.path()).isEqualTo("/projects?done=deleted");
         assertThat(list.body()).contains("The project and its history are deleted.");
         assertThat(visitor.get(path).status()).isEqualTo(404);
-        assertThat(projects.history(kept.project().id())).isEmpty();
+        assertThat(Cases.history(projects, kept.project().id())).isEmpty();
     }
 
     private String version(String path) throws Exception {
@@ -154,6 +162,21 @@ class ShelfPageTest {
     }
 
     @Test
+    void openASampleForSixPeopleAtOnce() throws Exception {
+        UUID id = Samples.byName("ferrin-lane").orElseThrow().id();
+        projects.find(id).ifPresent(kept -> projects.delete(id, kept.version()));
+        ExecutorService people = Executors.newFixedThreadPool(6);
+        Callable<Page> opening = () -> new Visitor(port).post("/projects/samples/ferrin-lane");
+        List<String> opened = new ArrayList<>();
+        for (Future<Page> page : people.invokeAll(Collections.nCopies(6, opening))) {
+            assertThat(page.get().status()).isEqualTo(200);
+            opened.add(page.get().id());
+        }
+        people.shutdown();
+        assertThat(opened).doesNotHaveDuplicates().contains(id.toString());
+    }
+
+    @Test
     void opensAFileAndSaysWhenItHoldsWhatIsKeptAlready() throws Exception {
         Project project = Copies.withFreshId(Cases.aSportsGround());
 
@@ -162,7 +185,7 @@ class ShelfPageTest {
         assertThat(opened.body()).contains("D1: Luminaire schedule, revision A, 2026-10-01, from the club");
         Page again = visitor.upload("x.skytally.json", ProjectFile.write(project));
         assertThat(again.path()).endsWith("?done=same");
-        assertThat(projects.history(project.id())).hasSize(1);
+        assertThat(Cases.history(projects, project.id())).hasSize(1);
     }
 
     @Test
@@ -183,7 +206,7 @@ class ShelfPageTest {
         Page replaced = visitor.post(askAgain.path() + "/replace", "version", askAgain.version());
         assertThat(replaced.path()).isEqualTo("/projects/" + other.id() + "?done=replaced");
         assertThat(projects.find(other.id()).orElseThrow().project()).isEqualTo(other);
-        assertThat(projects.history(other.id())).hasSize(2);
+        assertThat(Cases.history(projects, other.id())).hasSize(2);
     }
 
     @Test
