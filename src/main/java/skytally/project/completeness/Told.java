@@ -18,6 +18,7 @@ final class Told {
 
     private static final int MARKS = 6;
     private static final int FIGURES = 3;
+    private static final double LARGEST = 1e12;
 
     private Told() {}
 
@@ -40,10 +41,11 @@ final class Told {
         return QuantityFormat.asTyped(BigDecimal.valueOf(count)).plain();
     }
 
-    /** A number in the first unit of its field, if it is known. */
+    /** A number in the first unit of its field, if it is known, and no larger than anything that can be meant. */
     static OptionalDouble number(Values values, String field) {
         return Amount.of(values.get(field).inUse()).stream()
                 .mapToDouble(BigDecimal::doubleValue)
+                .filter(number -> Math.abs(number) <= LARGEST)
                 .findFirst();
     }
 

@@ -66,6 +66,9 @@ record PlanPage(
     private static final double BESIDE = 0.6;
 
     private static final double LEAST_BESIDE_M = 50;
+
+    /** What lies farther is no corner of a site. */
+    private static final double FARTHEST_M = 1_000_000;
     private static final Pattern CORNER = Pattern.compile("(-?\\d+(?:\\.\\d+)?)[\\s,]+(-?\\d+(?:\\.\\d+)?)");
 
     /** A scheme that may be drawn. */
@@ -134,7 +137,9 @@ record PlanPage(
         while (pairs.find()) {
             corners.add(new Point(metres(pairs.group(1), claim.unit()), metres(pairs.group(2), claim.unit())));
         }
-        return corners;
+        return corners.stream()
+                .filter(corner -> Math.hypot(corner.eastM(), corner.northM()) <= FARTHEST_M)
+                .toList();
     }
 
     private static double metres(String number, String unit) {

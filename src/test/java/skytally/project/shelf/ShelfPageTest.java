@@ -282,6 +282,55 @@ class ShelfPageTest {
         }
     }
 
+    /** Values are text in the file; one that is no number, or beyond all numbers, is shown as it is and never fails. */
+    @ParameterizedTest
+    @ValueSource(
+            strings = {
+                "<img src=x onerror=alert(1)>",
+                "NaN",
+                "Infinity",
+                "-Infinity",
+                "1e308",
+                "1e999999999",
+                "-1e-400",
+                "0x10",
+                "999999999999999999999999999999999999999999999999",
+                "’; DROP TABLE project; --"
+            })
+    void answersEveryPageWhateverTheValuesAre(String value) throws Exception {
+        String quoted = "\"" + value + "\"";
+        String file = new String(
+                        ProjectFile.write(Copies.withFreshId(
+                                Samples.byName("ferrin-lane").orElseThrow())),
+                        StandardCharsets.UTF_8)
+                .replaceAll(
+                        "(\"(?:value|unit|low|high)\" : )\"[^\"]*\"",
+                        "$1" + java.util.regex.Matcher.quoteReplacement(quoted));
+        Page opened = visitor.upload("x.skytally.json", file.getBytes(StandardCharsets.UTF_8));
+        if (opened.status() == 400) {
+            assertThat(opened.body()).contains("The file was not opened, and nothing was kept. /");
+            return;
+        }
+        assertThat(opened.status()).isEqualTo(200);
+
+        for (String page : ProjectPages.OF_FERRIN_LANE) {
+            Page answer = visitor.get("/projects/" + opened.id() + page);
+            assertThat(answer.status()).as(page).isEqualTo(200);
+            assertThat(answer.body()).as(page).doesNotContain("<img");
+        }
+    }
+
+    @ParameterizedTest
+    @ValueSource(strings = {"NaN", "Infinity", "1e308", "-1", "360"})
+    void refusesADirectionThatIsNone(String bearing) throws Exception {
+        int before = projects.list().size();
+        String good = new String(ProjectFile.write(Copies.withFreshId(Cases.aSportsGround())), StandardCharsets.UTF_8);
+
+        refused(good.replace("\"bearingDeg\" : \"200.0\"", "\"bearingDeg\" : \"" + bearing + "\""), "/places/0/looks/0: ");
+        refused(good.replace("\"bearingDeg\" : \"200.0\"", "\"bearingDeg\" : NaN"), "not JSON at line");
+        assertThat(projects.list()).hasSize(before);
+    }
+
     @Test
     void tellsTheHistoryNewestFirstInWordsAndTakesStepsBack() throws Exception {
         KeptProject kept = kept();
