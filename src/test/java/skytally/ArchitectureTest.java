@@ -52,7 +52,7 @@ class ArchitectureTest {
     private static final Map<String, List<String>> FEATURES = rooms("""
             storage    :
             web        :
-            project    : spectrum luminaire atmosphere scene web
+            project    : spectrum luminaire atmosphere scene charts web
             firstlook  : spectrum luminaire atmosphere scene assessment charts web project
             """);
 

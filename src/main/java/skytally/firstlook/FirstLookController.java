@@ -22,6 +22,14 @@ import skytally.web.Switches;
 class FirstLookController {
 
     private final Answers answers;
+    /** A way on from here: who takes it, and the sample that shows it. */
+    record Door(String name, String sample) {}
+
+    private static final List<Door> DOORS = List.of(
+            new Door("reviewing", "sillow-gateway"),
+            new Door("nearby", "ferrin-lane"),
+            new Door("designing", "ostrel-valley"));
+
     private final MessageSource messages;
 
     FirstLookController(Answers answers, MessageSource messages) {
@@ -42,6 +50,7 @@ class FirstLookController {
         }
         SentenceReader.Result read = SentenceReader.read(sent, switches.units());
         ModelAndView page = new ModelAndView("firstlook/page");
+        page.addObject("doors", DOORS);
         page.addObject("passedOver", SentenceReader.passedOver(sent));
         page.addObject("form", SentenceForm.of(sent, read, switches.units()));
         read.sentence()

@@ -62,27 +62,6 @@ class ChangeRow {
         this.after = change.after();
     }
 
-    long step() {
-        return step;
-    }
-
-    Instant changedAt() {
-        return changedAt;
-    }
-
-    String who() {
-        return who;
-    }
-
-    String why() {
-        return why;
-    }
-
-    @Nullable
-    Long undoes() {
-        return undoes;
-    }
-
     Difference.Change change() {
         return new Difference.Change(key, before, after);
     }

@@ -4,12 +4,14 @@ import java.nio.charset.StandardCharsets;
 import java.time.Clock;
 import java.time.Instant;
 import java.time.temporal.ChronoUnit;
-import java.util.ArrayList;
-import java.util.LinkedHashMap;
 import java.util.List;
 import java.util.Map;
 import java.util.Optional;
 import java.util.UUID;
+import java.util.stream.Collectors;
+import org.springframework.dao.ConcurrencyFailureException;
+import org.springframework.dao.DataIntegrityViolationException;
+import org.springframework.data.domain.Limit;
 import org.springframework.stereotype.Component;
 import org.springframework.transaction.annotation.Transactional;
 import skytally.project.transfer.Difference;
@@ -71,17 +73,27 @@ public class Projects {
     /**
      * Keeps a new project.
      *
-     * @throws IllegalArgumentException if one with its id is kept already, or its title is empty or too long
+     * @throws ProjectClashException    if one with its id is kept already; nothing is changed then
+     * @throws IllegalArgumentException if its title is empty or too long
      */
     @Transactional
     public KeptProject add(Project project, Saving saving) {
         requireTitle(project);
         if (rows.existsById(project.id())) {
-            throw new IllegalArgumentException("A project with this id is kept already");
+            throw new ProjectClashException();
         }
-        ProjectRow row = rows.saveAndFlush(new ProjectRow(project.id(), project.title(), text(project), now()));
+        ProjectRow row = inserted(new ProjectRow(project.id(), project.title(), text(project), now()));
         record(project.id(), Difference.between(Project.named(project.id(), ""), project), saving);
         return kept(row);
+    }
+
+    /** Two may add the same at once; whoever comes second is told so. */
+    private ProjectRow inserted(ProjectRow row) {
+        try {
+            return rows.saveAndFlush(row);
+        } catch (DataIntegrityViolationException | ConcurrencyFailureException keptByAnother) {
+            throw new ProjectClashException();
+        }
     }
 
     /**
@@ -106,14 +118,57 @@ public class Projects {
         return kept(rows.saveAndFlush(row));
     }
 
-    /** Everything that was ever saved of a project, the first save first. */
+    /**
+     * A page of what was ever saved of a project, the newest first.
+     *
+     * @param before  only steps with a lower number
+     * @param steps   as many steps at most
+     * @param changes as many changes of each at most
+     */
     @Transactional(readOnly = true)
-    public List<Step> history(UUID id) {
-        Map<Long, List<ChangeRow>> bySteps = new LinkedHashMap<>();
-        for (ChangeRow row : changes.findByProjectIdOrderByStepAscIdAsc(id)) {
-            bySteps.computeIfAbsent(row.step(), step -> new ArrayList<>()).add(row);
-        }
-        return bySteps.values().stream().map(Projects::step).toList();
+    public List<Step> history(UUID id, long before, int steps, int changes) {
+        return steps(id, this.changes.heads(id, before, Limit.of(steps)), 0, changes);
+    }
+
+    /** One step with a stretch of its changes, or nothing where there was none. */
+    @Transactional(readOnly = true)
+    public Optional<Step> step(UUID id, long number, int from, int most) {
+        List<ChangeRows.Head> found = changes.heads(id, number + 1, Limit.of(1)).stream()
+                .filter(head -> head.getStep() == number)
+                .toList();
+        return steps(id, found, from, most).stream().findFirst();
+    }
+
+    private List<Step> steps(UUID id, List<ChangeRows.Head> heads, int from, int most) {
+        List<Long> numbers = heads.stream().map(ChangeRows.Head::getStep).toList();
+        Map<Long, Long> takenBack = changes.takenBack(id, numbers).stream()
+                .collect(Collectors.toMap(ChangeRows.TakenBack::getUndone, ChangeRows.TakenBack::getBy));
+        return heads.stream()
+                .map(head -> new Step(
+                        head.getStep(),
+                        head.getChangedAt(),
+                        head.getWho(),
+                        head.getWhy(),
+                        head.getUndoes(),
+                        takenBack.get(head.getStep()),
+                        head.getCount(),
+                        changesOf(id, head.getStep(), from, most)))
+                .toList();
+    }
+
+    private List<Difference.Change> changesOf(UUID id, long step, int from, int most) {
+        return changes.changes(id, step, from, most).stream()
+                .map(ChangeRow::change)
+                .toList();
+    }
+
+    /**
+     * The step that {@link #undo} takes back next, or nothing. It is the last that neither takes another back nor was
+     * taken back itself; the first, which made the project, stays.
+     */
+    @Transactional(readOnly = true)
+    public Optional<Long> lastStanding(UUID id) {
+        return changes.lastStanding(id);
     }
 
     /** How many saves there were of a project. */
@@ -135,16 +190,17 @@ public class Projects {
         if (row.version() != openedAt) {
             throw new ProjectClashException();
         }
-        Optional<Step> last = Step.lastStanding(history(id));
+        Optional<Long> last = changes.lastStanding(id);
         if (last.isEmpty()) {
             return Optional.empty();
         }
-        Step step = last.get();
-        List<Difference.Change> back =
-                step.changes().stream().map(Difference.Change::reversed).toList();
+        long step = last.get();
+        List<Difference.Change> back = changesOf(id, step, 0, Integer.MAX_VALUE).stream()
+                .map(Difference.Change::reversed)
+                .toList();
         try {
             Project before = Difference.applied(kept(row).project(), back);
-            return Optional.of(save(before, openedAt, new Saving(who, "Undo", step.number())));
+            return Optional.of(save(before, openedAt, new Saving(who, "Undo", step)));
         } catch (ProjectFileException cannot) {
             throw new IllegalStateException("The history of project " + id + " does not fit it", cannot);
         }
@@ -170,17 +226,6 @@ public class Projects {
         changes.saveAll(made.stream()
                 .map(change -> new ChangeRow(id, step, at, saving, change))
                 .toList());
-    }
-
-    private static Step step(List<ChangeRow> rows) {
-        ChangeRow first = rows.get(0);
-        return new Step(
-                first.step(),
-                first.changedAt(),
-                first.who(),
-                first.why(),
-                first.undoes(),
-                rows.stream().map(ChangeRow::change).toList());
     }
 
     private static KeptProject kept(ProjectRow row) {

@@ -1,8 +1,13 @@
 package skytally.firstlook;
 
 import static org.assertj.core.api.Assertions.assertThat;
+import static org.assertj.core.api.Assertions.within;
 
+import java.util.ArrayList;
+import java.util.List;
 import java.util.UUID;
+import java.util.regex.Matcher;
+import java.util.regex.Pattern;
 import org.junit.jupiter.api.DisplayName;
 import org.junit.jupiter.api.Test;
 import org.springframework.beans.factory.annotation.Autowired;
@@ -103,6 +108,33 @@ class KeepPageTest {
         assertThat(lumens.low() + " " + lumens.value() + " " + lumens.high()).isEqualTo("3500 5200 8000");
         assertThat(type.text("tilt")).isEqualTo("90");
         assertThat(type.get("tilt").inUse().source().reason()).isEqualTo("This kind of fitting stands upright.");
+    }
+
+    @Test
+    void keepsAnyAnswerWithoutAnythingTypedAgain() throws Exception {
+        Visitor visitor = new Visitor(port);
+        String page = visitor.get("/?form=sentence&units=us&count=2&lumens=9000&mountingHeightFt=20&distanceFt=1000"
+                        + "&tiltDeg=15&shape=flat-area&guessed=shape")
+                .body();
+        assertThat(page).contains("href=\"#keep\"", "id=\"keep\"");
+        String form = page.substring(page.indexOf("id=\"keep\""), page.indexOf("</form>", page.indexOf("id=\"keep\"")));
+        List<String> sent = new ArrayList<>(List.of("title", "In feet"));
+        Matcher hidden = Pattern.compile("type=\"hidden\" name=\"(?!_csrf)([^\"]+)\" value=\"([^\"]*)\"").matcher(form);
+        while (hidden.find()) {
+            sent.addAll(List.of(hidden.group(1), hidden.group(2)));
+        }
+
+        Project project = kept(sent.toArray(String[]::new));
+        Values type = project.scheme("proposed")
+                .orElseThrow()
+                .type("L1")
+                .orElseThrow()
+                .values();
+        assertThat(Double.parseDouble(type.text("mountingHeight"))).isCloseTo(6.096, within(1e-6));
+        assertThat(type.text("tilt")).isEqualTo("15");
+        assertThat(Double.parseDouble(project.place("P1").orElseThrow().values().text("north")))
+                .isCloseTo(304.8, within(1e-6));
+        assertThat(type.get("shape").inUse().state()).isEqualTo(State.NOT_KNOWN);
     }
 
     @Test

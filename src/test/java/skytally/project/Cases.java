@@ -1,5 +1,7 @@
 package skytally.project;
 
+import java.util.ArrayList;
+import java.util.Collections;
 import java.util.List;
 import java.util.Map;
 import java.util.UUID;
@@ -54,6 +56,13 @@ public final class Cases {
                                 List.of(new Place.NamedLook("toward the pitch", 200, 12.5)),
                                 List.of(new Place.HorizonPoint(0, 2), new Place.HorizonPoint(90, 3))),
                         new Place("VA8", grid("2816.8", "5297.7"), List.of(), List.of())));
+    }
+
+    /** Everything that was ever saved of a project, the first save first. */
+    public static List<Step> history(Projects projects, UUID id) {
+        List<Step> steps = new ArrayList<>(projects.history(id, Long.MAX_VALUE, Integer.MAX_VALUE, Integer.MAX_VALUE));
+        Collections.reverse(steps);
+        return steps;
     }
 
     private static Values grid(String east, String north) {

@@ -14,7 +14,6 @@ import org.springframework.boot.test.context.SpringBootTest;
 import org.springframework.boot.test.web.server.LocalServerPort;
 import skytally.browser.Browser;
 import skytally.browser.InBrowser;
-import skytally.web.Switches;
 
 @InBrowser
 @DisplayName("The pages on which a project is described, in a browser")
@@ -30,13 +29,16 @@ class ProjectPagesBrowserTest {
     private Projects projects;
 
     @Test
-    void takeAnEmptyProjectToTwoTypesAndTwoPlacesByKeyboardWithScriptsOff() {
-        UUID id = projects.add(Project.named(UUID.randomUUID(), "From nothing"), Saving.by("", ""))
-                .project()
-                .id();
-        String at = "/projects/" + id;
+    void goFromNothingToLightsAndPlacesByKeyboardWithScriptsOff() {
+        UUID id;
         try (Browser browser = Browser.withoutScripts(port)) {
-            browser.open(at + "/documents");
+            browser.open("/projects");
+            type(browser, "title", "From nothing");
+            send(browser, "title", "The project is kept.");
+            id = UUID.fromString(
+                    browser.driver().getCurrentUrl().replaceAll("^.*/projects/([0-9a-f-]{36}).*$", "$1"));
+
+            follow(browser, "Documents");
             type(browser, "mark", "D1");
             type(browser, "title", "Luminaire schedule");
             send(browser, "title", "The document was added.");
@@ -49,6 +51,7 @@ class ProjectPagesBrowserTest {
 
             aType(browser, "A1", "5 200", "20");
             aType(browser, "B.2", "2600", "15");
+            aLight(browser, "-36", "37");
 
             follow(browser, "Places");
             aPlace(browser, "V1", "-12", "86");
@@ -60,6 +63,8 @@ class ProjectPagesBrowserTest {
         Claim height = proposed.types().get(0).values().get("mountingHeight").inUse();
         assertThat(height.value() + " " + height.unit() + " " + height.source().document() + " " + height.who())
                 .isEqualTo("20 ft D1 A. Planner");
+        assertThat(proposed.placements()).hasSize(1);
+        assertThat(proposed.placements().get(0).values().text("east")).isEqualTo("-36");
         assertThat(project.places()).extracting(Place::mark).containsExactly("V1", "V2");
         assertThat(project.places().get(1).values().text("east")).isEqualTo("300");
     }
@@ -73,6 +78,18 @@ class ProjectPagesBrowserTest {
         type(browser, "mountingHeight", feet);
         choose(browser, "mountingHeight-unit", "ft");
         send(browser, "lumens", "Saved.");
+    }
+
+    private void aLight(Browser browser, String east, String north) {
+        follow(browser, "Lights");
+        browser.driver()
+                .findElement(By.partialLinkText("Positions: What is proposed"))
+                .sendKeys(Keys.ENTER);
+        browser.awaitText(By.tagName("h1"), "Positions");
+        choose(browser, "document", "D1 Luminaire schedule");
+        type(browser, "east", east);
+        type(browser, "north", north);
+        send(browser, "north", "The lights were added to the plan.");
     }
 
     private void aPlace(Browser browser, String mark, String east, String north) {
@@ -119,61 +136,6 @@ class ProjectPagesBrowserTest {
     }
 
     @Test
-    void canBeReadWideAndNarrowInEveryTheme() {
-        Project ground = Cases.aSportsGround();
-        Project project = new Project(
-                UUID.randomUUID(),
-                "Recreation ground",
-                ground.documents(),
-                ground.site(),
-                ground.schemes(),
-                ground.places());
-        String at = "/projects/"
-                + projects.add(project, Saving.by("", "")).project().id();
-        String[][] all = {
-            {"documents", "/documents"},
-            {"document", "/documents/D1"},
-            {"site", "/site"},
-            {"lights", "/lights"},
-            {"type", "/lights/proposed/types/A1"},
-            {"positions", "/lights/proposed/positions"},
-            {"ring", "/lights/proposed/positions?add=ring"},
-            {"light", "/lights/proposed/positions/A1-01"},
-            {"places", "/places"},
-            {"place", "/places/VA1"},
-        };
-        try (Browser browser = Browser.on(port)) {
-            for (String[] page : all) {
-                for (Switches.Theme theme : themes(page[0])) {
-                    for (int width : new int[] {Browser.WIDE, Browser.NARROW}) {
-                        browser.width(width);
-                        browser.open(at + page[1] + (page[1].contains("?") ? "&" : "?") + "theme=" + theme.word());
-                        for (WebElement more :
-                                browser.driver().findElements(By.cssSelector("details.app-entry__more"))) {
-                            if (theme == Switches.Theme.DARK) {
-                                browser.driver().executeScript("arguments[0].open = true", more);
-                            }
-                        }
-                        browser.screenshot("project-" + page[0] + "-" + width + "-" + theme.word(), width);
-
-                        assertThat(browser.accessibilityFaults()).as(page[0]).isEmpty();
-                        assertThat(browser.scrollsSideways())
-                                .as(page[0] + width)
-                                .isFalse();
-                    }
-                }
-            }
-        }
-    }
-
-    /** Each component is on one of four pages, which are looked at in every theme; the others by day. */
-    private static List<Switches.Theme> themes(String page) {
-        return List.of("lights", "type", "ring", "place").contains(page)
-                ? List.of(Switches.Theme.values())
-                : List.of(Switches.Theme.DAY);
-    }
-
-    @Test
     void sayWhatIsWrongAndThatAnotherSavedFirst() {
         KeptProject kept = projects.add(Project.named(UUID.randomUUID(), "Two at once"), Saving.by("", ""));
         String at = "/projects/" + kept.project().id();
@@ -204,5 +166,39 @@ class ProjectPagesBrowserTest {
                 assertThat(browser.scrollsSideways()).isFalse();
             }
         }
+    }
+
+    @Test
+    void giveBackWhatTheSecondOfTwoTyped() {
+        UUID id = projects.add(Project.named(UUID.randomUUID(), "Two windows"), Saving.by("", ""))
+                .project()
+                .id();
+        String site = "/projects/" + id + "/site";
+        try (Browser first = Browser.on(port);
+                Browser second = Browser.withoutScripts(port)) {
+            first.open(site);
+            second.open(site);
+            type(first, "why", "read off the survey");
+            type(first, "latitude", "52.4");
+            send(first, "latitude", "Saved.");
+
+            type(second, "why", "read off the letter");
+            type(second, "longitude", "-25");
+            field(second, "longitude").sendKeys(Keys.ENTER);
+            second.awaitText(By.tagName("h1"), "It was changed in the meantime");
+            assertThat(second.driver().findElement(By.tagName("main")).getText())
+                    .contains("Longitude, east positive", "-25", "read off the letter");
+
+            second.driver()
+                    .findElement(By.linkText("Open the page as it stands now"))
+                    .sendKeys(Keys.ENTER);
+            second.awaitText(By.tagName("h1"), "Site");
+            assertThat(field(second, "latitude").getDomProperty("value")).isEqualTo("52.4");
+            type(second, "why", "read off the letter");
+            type(second, "longitude", "-25");
+            send(second, "longitude", "Saved.");
+        }
+        Values both = projects.find(id).orElseThrow().project().site();
+        assertThat(both.text("latitude") + " " + both.text("longitude")).isEqualTo("52.4 -25");
     }
 }

@@ -140,7 +140,7 @@ class ProjectPagesTest {
         assertThat(type("A1").get("mountingHeight").inUse().state()).isEqualTo(State.ASSUMED);
         assertThat(pages.get(page).words())
                 .contains("the claims differ", "20 ft", "D1 Luminaire schedule; the applicant's, A. Planner, 20");
-        assertThat(projects.history(id)).hasSize(3);
+        assertThat(Cases.history(projects, id)).hasSize(3);
     }
 
     private static Stated proposedBefore(String field) {

@@ -40,7 +40,7 @@ class ProjectsTest {
         projects.add(project, Saving.by("A. Planner", "from the file"));
         assertThat(projects.find(project.id()).orElseThrow().project()).isEqualTo(project);
         assertThat(projects.list()).extracting(Projects.Listed::title).contains("Kept");
-        assertThat(projects.history(project.id())).hasSize(1).first().satisfies(step -> {
+        assertThat(Cases.history(projects, project.id())).hasSize(1).first().satisfies(step -> {
             assertThat(step.number()).isEqualTo(1);
             assertThat(step.who()).isEqualTo("A. Planner");
             assertThat(step.changes()).extracting(change -> change.key()).contains("title", "places/VA8/values/east");
@@ -78,7 +78,55 @@ class ProjectsTest {
         }
         people.shutdown();
         assertThat(won).isEqualTo(1);
-        assertThat(projects.history(opened.project().id())).hasSize(2);
+        assertThat(Cases.history(projects, opened.project().id())).hasSize(2);
+    }
+
+    @Test
+    void letOneOfManyAtOnceBeTheFirst() throws Exception {
+        Project project = fresh("Eight at once");
+        ExecutorService people = Executors.newFixedThreadPool(8);
+        List<Callable<Boolean>> adds = new ArrayList<>();
+        for (int i = 0; i < 8; i++) {
+            adds.add(() -> {
+                try {
+                    projects.add(project, Saving.by("", ""));
+                    return true;
+                } catch (ProjectClashException keptAlready) {
+                    return false;
+                }
+            });
+        }
+        int won = 0;
+        for (Future<Boolean> add : people.invokeAll(adds)) {
+            won += add.get() ? 1 : 0;
+        }
+        people.shutdown();
+        assertThat(won).isEqualTo(1);
+        assertThat(projects.countSteps(project.id())).isEqualTo(1);
+    }
+
+    @Test
+    void tellTheirHistoryInPagesAndEachStepInStretches() {
+        KeptProject kept = projects.add(fresh("1"), Saving.by("", ""));
+        UUID id = kept.project().id();
+        for (int i = 2; i <= 5; i++) {
+            kept = projects.save(titled(kept.project(), String.valueOf(i)), kept.version(), Saving.by("A", "why " + i));
+        }
+        projects.undo(id, kept.version(), "B");
+
+        List<Step> newest = projects.history(id, Long.MAX_VALUE, 3, 1);
+        assertThat(newest).extracting(Step::number).containsExactly(6L, 5L, 4L);
+        assertThat(newest).extracting(Step::undoes).containsExactly(5L, null, null);
+        assertThat(newest).extracting(Step::takenBackBy).containsExactly(null, 6L, null);
+        assertThat(newest.get(1).why()).isEqualTo("why 5");
+        assertThat(projects.history(id, 4, 3, 1)).extracting(Step::number).containsExactly(3L, 2L, 1L);
+        assertThat(projects.lastStanding(id)).hasValue(4L);
+
+        Step first = projects.step(id, 1, 0, Integer.MAX_VALUE).orElseThrow();
+        assertThat(first.count()).isEqualTo(first.changes().size()).isGreaterThan(10);
+        assertThat(projects.step(id, 1, 3, 4).orElseThrow().changes())
+                .isEqualTo(first.changes().subList(3, 7));
+        assertThat(projects.step(id, 7, 0, 1)).isEmpty();
     }
 
     @Test
@@ -95,7 +143,7 @@ class ProjectsTest {
         kept = projects.undo(id, kept.version(), "A").orElseThrow();
         assertThat(kept.project().title()).isEqualTo("One");
         assertThat(projects.undo(id, kept.version(), "A")).isEmpty();
-        assertThat(projects.history(id)).hasSize(7);
+        assertThat(Cases.history(projects, id)).hasSize(7);
     }
 
     @Test
@@ -103,7 +151,7 @@ class ProjectsTest {
         KeptProject kept = projects.add(fresh("Gone"), Saving.by("", ""));
         projects.delete(kept.project().id(), kept.version());
         assertThat(projects.find(kept.project().id())).isEmpty();
-        assertThat(projects.history(kept.project().id())).isEmpty();
+        assertThat(Cases.history(projects, kept.project().id())).isEmpty();
     }
 
     @Test

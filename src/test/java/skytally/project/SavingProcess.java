@@ -28,7 +28,7 @@ class SavingProcess {
                 .run(args)) {
             Projects projects = context.getBean(Projects.class);
             for (Projects.Listed one : projects.list()) {
-                say(FOUND + one.id() + " " + projects.history(one.id()).size() + " " + one.title());
+                say(FOUND + one.id() + " " + projects.countSteps(one.id()) + " " + one.title());
             }
             say(READY);
             int number = 0;

@@ -52,6 +52,36 @@ class ErrorsPageTest {
         }
     }
 
+    /** The server refuses these before any page is asked. */
+    @ParameterizedTest
+    @ValueSource(strings = {"/%00", "/a%2Fb", "/a%5Cb", "/?a[]=1", "/?a=\"", "/{id}"})
+    void looksTheSameWhereTheServerCouldNotReadTheAddress(String path) throws Exception {
+        Wire.Answer page = Wire.get(port, path)
+                .header("Accept", "text/html,*/*;q=0.8")
+                .header("Cookie", "skytally-theme=telescope")
+                .send();
+        assertThat(page.status()).isEqualTo(400);
+        assertThat(page.header("Content-Type")).isEqualTo("text/html;charset=UTF-8");
+        assertThat(page.header("Content-Security-Policy")).isEqualTo(PageHeadersFilter.CONTENT_SECURITY_POLICY);
+        assertThat(page.body())
+                .contains("<h1>The request could not be read</h1>", "What happened", "What is kept", "What to do")
+                .contains("href=\"/css/tokens.css\"", "class=\"app-told\"", path.startsWith("/%") ? "telescope" : "data-theme")
+                .doesNotContainIgnoringCase("tomcat")
+                .doesNotContain("Exception", "<script", " style=");
+    }
+
+    /** Where the first line of the request could be read, and what is asked for with it. */
+    @ParameterizedTest
+    @ValueSource(strings = {"/%00", "/a%2Fb", "/a%5Cb"})
+    void isAProblemForAProgramWhereTheServerCouldNotReadTheAddress(String path) throws Exception {
+        Wire.Answer data =
+                Wire.get(port, path).header("Accept", "application/json").send();
+        assertThat(data.status()).isEqualTo(400);
+        assertThat(data.header("Content-Type")).isEqualTo("application/problem+json;charset=UTF-8");
+        assertThat(data.body())
+                .startsWith("{\"type\":\"about:blank\",\"title\":\"The request could not be read\",\"status\":400,");
+    }
+
     @Test
     void toSendToAPageThatTakesNothingIsToldAsThat() throws Exception {
         Wire.Answer page = Wire.get(port, "/test/form").send();

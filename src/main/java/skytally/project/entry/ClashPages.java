@@ -7,7 +7,7 @@ import java.util.Arrays;
 import java.util.List;
 import java.util.Map;
 import java.util.Set;
-import org.springframework.dao.OptimisticLockingFailureException;
+import org.springframework.dao.ConcurrencyFailureException;
 import org.springframework.http.HttpStatus;
 import org.springframework.stereotype.Controller;
 import org.springframework.web.bind.annotation.ControllerAdvice;
@@ -43,7 +43,7 @@ class ClashPages {
     @ControllerAdvice
     static class Advice {
 
-        @ExceptionHandler({ProjectClashException.class, OptimisticLockingFailureException.class})
+        @ExceptionHandler({ProjectClashException.class, ConcurrencyFailureException.class})
         String clash() {
             return "forward:" + PATH;
         }

@@ -1,6 +1,7 @@
 package skytally.project.entry;
 
 import java.util.List;
+import java.util.UUID;
 import org.springframework.web.bind.annotation.ControllerAdvice;
 import org.springframework.web.bind.annotation.ModelAttribute;
 
@@ -10,18 +11,27 @@ class ProjectRooms {
 
     /** The pages that exist, in the order they are named. A new page is one line here. */
     private static final List<Room> ROOMS = List.of(
+            new Room("front", ""),
             new Room("documents", "documents"),
             new Room("site", "site"),
             new Room("lights", "lights"),
-            new Room("places", "places"));
+            new Room("places", "places"),
+            new Room("plan", "plan"),
+            new Room("history", "history"));
 
     /**
      * A page of a project.
      *
      * @param name as in messages: {@code project.room.lights}, and as {@code project/rooms} is told the current one
-     * @param path after the address of the project
+     * @param path after the address of the project, or empty for that address itself
      */
-    record Room(String name, String path) {}
+    record Room(String name, String path) {
+
+        /** Its address in one project. */
+        public String in(UUID project) {
+            return "/projects/" + project + (path.isEmpty() ? "" : "/" + path);
+        }
+    }
 
     @ModelAttribute("projectRooms")
     List<Room> rooms() {

@@ -17,18 +17,22 @@ public record Spot(double eastM, double northM) {
 
     private static final int CENTIMETRES = 2;
 
+    /** A file may hold more than a form takes; what lies farther is taken as not placed. */
+    private static final double FARTHEST_M = 1_000_000;
+
     /** Where the values say, if they say where. */
     public static Optional<Spot> of(Values values) {
         return of(values, "east", "north");
     }
 
-    /** Where two of the values say, if both are known. */
+    /** Where two of the values say, if both are known and on this Earth. */
     public static Optional<Spot> of(Values values, String east, String north) {
         Optional<BigDecimal> eastM = Amount.of(values.get(east).inUse());
         Optional<BigDecimal> northM = Amount.of(values.get(north).inUse());
         return eastM.isEmpty() || northM.isEmpty()
                 ? Optional.empty()
-                : Optional.of(new Spot(eastM.get().doubleValue(), northM.get().doubleValue()));
+                : Optional.of(new Spot(eastM.get().doubleValue(), northM.get().doubleValue()))
+                        .filter(spot -> Math.abs(spot.eastM) <= FARTHEST_M && Math.abs(spot.northM) <= FARTHEST_M);
     }
 
     /** The point at a distance on a bearing from this one. */

@@ -17,6 +17,7 @@ import skytally.project.Field;
 import skytally.project.KeptProject;
 import skytally.project.Party;
 import skytally.project.Project;
+import skytally.project.Saving;
 import skytally.project.Source;
 import skytally.project.Stated;
 import skytally.project.Values;
@@ -30,7 +31,6 @@ import skytally.web.InvalidInputException.Fault;
 @Component
 public class ValuesEditor {
 
-    private static final int LONGEST_WHO = 200;
     private static final int LONGEST_REASON = 1000;
 
     private final Words words;
@@ -135,9 +135,9 @@ public class ValuesEditor {
         if (!heading.party().isEmpty() && Party.byId(heading.party()).isEmpty()) {
             faults.add(new Fault("party", words.say("entry.fault.party")));
         }
-        if (heading.who().length() > LONGEST_WHO) {
+        if (heading.who().length() > Saving.LONGEST_WHO) {
             faults.add(new Fault(
-                    "who", words.say("entry.fault.long", words.say("entry.who"), String.valueOf(LONGEST_WHO))));
+                    "who", words.say("entry.fault.long", words.say("entry.who"), String.valueOf(Saving.LONGEST_WHO))));
         }
         if (heading.why().length() > LONGEST_REASON) {
             faults.add(new Fault(

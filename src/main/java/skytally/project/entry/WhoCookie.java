@@ -5,16 +5,21 @@ import jakarta.servlet.http.HttpServletRequest;
 import jakarta.servlet.http.HttpServletResponse;
 import java.nio.charset.StandardCharsets;
 import java.time.Duration;
+import java.util.List;
 import org.springframework.http.HttpHeaders;
 import org.springframework.http.ResponseCookie;
 import org.springframework.web.util.UriUtils;
 import org.springframework.web.util.WebUtils;
+import skytally.project.Saving;
+import skytally.web.InvalidInputException;
 
-/** The name of whoever types in this browser, so that it is typed once. */
+/** The name of whoever types in this browser, so that it is typed once: no account, only a cookie. */
 public final class WhoCookie {
 
+    /** Of the field in every form that saves. */
+    private static final String FIELD = "who";
+
     private static final String NAME = "skytally-who";
-    private static final int LONGEST = 200;
 
     private WhoCookie() {}
 
@@ -26,7 +31,7 @@ public final class WhoCookie {
         }
         try {
             String who = UriUtils.decode(cookie.getValue(), StandardCharsets.UTF_8);
-            return who.length() > LONGEST ? "" : who;
+            return who.length() > Saving.LONGEST_WHO ? "" : who;
         } catch (IllegalArgumentException spoiled) {
             return "";
         }
@@ -43,5 +48,20 @@ public final class WhoCookie {
                         .maxAge(who.isEmpty() ? Duration.ZERO : Duration.ofDays(365))
                         .build()
                         .toString());
+    }
+
+    /**
+     * The name as typed now, remembered for the next form.
+     *
+     * @throws InvalidInputException if it is longer than its field takes
+     */
+    public static String taken(String typed, HttpServletResponse response) {
+        String who = typed.strip();
+        if (who.length() > Saving.LONGEST_WHO) {
+            throw new InvalidInputException(List.of(new InvalidInputException.Fault(
+                    FIELD, "The name has more than " + Saving.LONGEST_WHO + " characters. Shorten it.")));
+        }
+        keep(response, who);
+        return who;
     }
 }

@@ -24,6 +24,8 @@ import skytally.project.KeptProject;
 import skytally.project.Project;
 import skytally.project.Projects;
 import skytally.project.Saving;
+import skytally.project.entry.WhoCookie;
+import skytally.project.entry.Words;
 import skytally.project.transfer.ProjectFile;
 import skytally.web.InvalidInputException.Fault;
 
@@ -38,29 +40,36 @@ class FrontController {
 
     private final Projects projects;
     private final MessageSource messages;
+    private final Words words;
     private final Clock clock = Clock.systemUTC();
 
-    FrontController(Projects projects, MessageSource messages) {
+    FrontController(Projects projects, MessageSource messages, Words words) {
         this.projects = projects;
         this.messages = messages;
+        this.words = words;
     }
 
     @GetMapping
     ModelAndView front(
-            @PathVariable String id, @RequestParam(defaultValue = "") String done, HttpServletRequest request) {
+            @PathVariable String id,
+            @RequestParam(defaultValue = "") String done,
+            @RequestParam(defaultValue = "") String scheme,
+            HttpServletRequest request) {
         KeptProject kept = projects.require(id);
-        ModelAndView page = page(kept, kept.project().title(), List.of(), request);
+        ModelAndView page = page(kept, scheme, kept.project().title(), List.of(), request);
         page.addObject("done", DONE.contains(done) ? done : null);
         return page;
     }
 
-    private ModelAndView page(KeptProject kept, String typedTitle, List<Fault> faults, HttpServletRequest request) {
+    private ModelAndView page(
+            KeptProject kept, String scheme, String typedTitle, List<Fault> faults, HttpServletRequest request) {
         ModelAndView page = new ModelAndView("project/front");
         page.addObject("kept", kept);
+        page.addObject("complete", CompletePart.of(kept.project(), scheme, words));
         page.addObject("holding", Holding.of(kept.project()));
         page.addObject("changed", Ago.of(kept.changedAt(), clock.instant()));
         page.addObject("typedTitle", typedTitle);
-        page.addObject("who", TypedName.last(request));
+        page.addObject("who", WhoCookie.in(request));
         page.addObject("faults", faults);
         if (!faults.isEmpty()) {
             page.setStatus(HttpStatus.BAD_REQUEST);
@@ -91,9 +100,9 @@ class FrontController {
         KeptProject kept = projects.require(id);
         List<Fault> faults = ShelfController.titleFaults(title, messages);
         if (!faults.isEmpty()) {
-            return page(kept, title, faults, request);
+            return page(kept, "", title, faults, request);
         }
-        String name = TypedName.taken(who, response);
+        String name = WhoCookie.taken(who, response);
         projects.save(Copies.titled(kept.project(), title.strip()), version, Saving.by(name, say("shelf.why.renamed")));
         return to(kept.project().id(), "renamed");
     }
@@ -102,7 +111,7 @@ class FrontController {
     ModelAndView copy(@PathVariable String id, HttpServletRequest request) {
         Project project = projects.require(id).project();
         Project copy = Copies.titled(Copies.withFreshId(project), Copies.copyTitle(project.title()));
-        projects.add(copy, Saving.by(TypedName.last(request), say("shelf.why.copied")));
+        projects.add(copy, Saving.by(WhoCookie.in(request), say("shelf.why.copied")));
         return to(copy.id(), "copied");
     }
 

@@ -3,7 +3,6 @@ package skytally.project.shelf;
 import jakarta.servlet.http.HttpServletRequest;
 import jakarta.servlet.http.HttpServletResponse;
 import java.time.Clock;
-import java.util.List;
 import java.util.Optional;
 import java.util.Set;
 import java.util.UUID;
@@ -18,6 +17,7 @@ import skytally.project.KeptProject;
 import skytally.project.NoSuchProjectException;
 import skytally.project.Projects;
 import skytally.project.Step;
+import skytally.project.entry.WhoCookie;
 
 /** Everything that was ever saved of a project, and the way back. */
 @Controller
@@ -47,12 +47,16 @@ class HistoryController {
         page.addObject(
                 "history",
                 HistoryPage.of(
-                        projects.history(uuid),
+                        projects.history(
+                                uuid,
+                                number(before).orElse(Long.MAX_VALUE),
+                                HistoryPage.STEPS + 1,
+                                HistoryPage.CHANGES),
+                        projects.lastStanding(uuid).orElse(null),
                         kept.project(),
-                        number(before).orElse(Long.MAX_VALUE),
                         clock.instant()));
         page.addObject("done", DONE.contains(done) ? done : null);
-        page.addObject("who", TypedName.last(request));
+        page.addObject("who", WhoCookie.in(request));
         return page;
     }
 
@@ -60,18 +64,15 @@ class HistoryController {
     ModelAndView step(
             @PathVariable String id, @PathVariable String step, @RequestParam(defaultValue = "0") String from) {
         KeptProject kept = projects.require(id);
-        List<Step> history = projects.history(kept.project().id());
         long wanted = number(step).orElseThrow(NoSuchProjectException::new);
-        Step found = history.stream()
-                .filter(one -> one.number() == wanted)
-                .findFirst()
+        int first = number(from).orElse(0L).intValue();
+        Step found = projects.step(kept.project().id(), wanted, first, CHANGES_A_PAGE)
                 .orElseThrow(NoSuchProjectException::new);
-        int first = (int) Math.min(number(from).orElse(0L), found.changes().size());
         ModelAndView page = new ModelAndView("project/step");
         page.addObject("kept", kept);
-        page.addObject("step", HistoryPage.one(found, history, kept.project(), clock.instant(), first, CHANGES_A_PAGE));
+        page.addObject("step", HistoryPage.line(found, kept.project(), clock.instant()));
         page.addObject("first", first);
-        page.addObject("next", first + CHANGES_A_PAGE < found.changes().size() ? first + CHANGES_A_PAGE : null);
+        page.addObject("next", first + CHANGES_A_PAGE < found.count() ? first + CHANGES_A_PAGE : null);
         return page;
     }
 
@@ -83,7 +84,7 @@ class HistoryController {
             HttpServletResponse response) {
         UUID uuid = projects.require(id).project().id();
         boolean undone =
-                projects.undo(uuid, version, TypedName.taken(who, response)).isPresent();
+                projects.undo(uuid, version, WhoCookie.taken(who, response)).isPresent();
         return new ModelAndView("redirect:/projects/" + uuid + "/history?done=" + (undone ? "undone" : "nothing"));
     }
 

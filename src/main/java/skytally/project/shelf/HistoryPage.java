@@ -2,9 +2,7 @@ package skytally.project.shelf;
 
 import java.math.BigDecimal;
 import java.time.Instant;
-import java.util.HashMap;
 import java.util.List;
-import java.util.Map;
 import org.jspecify.annotations.Nullable;
 import skytally.notation.QuantityFormat;
 import skytally.project.Project;
@@ -20,10 +18,13 @@ import skytally.project.Step;
 public record HistoryPage(
         List<StepLine> steps,
         @Nullable Long older,
-        @Nullable StepLine undone) {
+        @Nullable Long undone) {
 
-    private static final int STEPS_A_PAGE = 20;
-    private static final int CHANGES_SHOWN = 40;
+    /** Saves on one page. */
+    static final int STEPS = 20;
+
+    /** Changes shown of each. */
+    static final int CHANGES = 40;
 
     /**
      * One save.
@@ -45,9 +46,9 @@ public record HistoryPage(
             @Nullable Long undoes,
             @Nullable Long takenBackBy,
             List<ChangeLine> changes,
-            int count) {
+            long count) {
 
-        public int more() {
+        public long more() {
             return count - changes.size();
         }
 
@@ -57,57 +58,27 @@ public record HistoryPage(
         }
     }
 
-    /**
-     * @param history the first step first
-     * @param before  only steps with a lower number
-     */
-    static HistoryPage of(List<Step> history, Project project, long before, Instant now) {
-        Map<Long, Long> takenBack = takenBack(history);
-        List<Step> wanted =
-                history.stream().filter(step -> step.number() < before).toList();
-        int from = Math.max(0, wanted.size() - STEPS_A_PAGE);
-        List<StepLine> lines = wanted.subList(from, wanted.size()).stream()
-                .map(step -> line(step, takenBack, project, now, 0, CHANGES_SHOWN))
-                .sorted((a, b) -> Long.compare(b.number(), a.number()))
+    /** Of as many steps as stand on a page, and one more if there is more. */
+    static HistoryPage of(List<Step> found, @Nullable Long undone, Project project, Instant now) {
+        List<StepLine> lines = found.stream()
+                .limit(STEPS)
+                .map(step -> line(step, project, now))
                 .toList();
-        return new HistoryPage(
-                lines,
-                from == 0 ? null : wanted.get(from).number(),
-                Step.lastStanding(history)
-                        .map(step -> line(step, takenBack, project, now, 0, 0))
-                        .orElse(null));
+        Long older = found.size() > STEPS ? lines.get(STEPS - 1).number() : null;
+        return new HistoryPage(lines, older, undone);
     }
 
-    /** One step with a stretch of its changes. */
-    static StepLine one(Step step, List<Step> history, Project project, Instant now, int from, int most) {
-        return line(step, takenBack(history), project, now, from, most);
-    }
-
-    private static Map<Long, Long> takenBack(List<Step> history) {
-        Map<Long, Long> takenBack = new HashMap<>();
-        for (Step step : history) {
-            Long undoes = step.undoes();
-            if (undoes != null) {
-                takenBack.put(undoes, step.number());
-            }
-        }
-        return takenBack;
-    }
-
-    private static StepLine line(
-            Step step, Map<Long, Long> takenBack, Project project, Instant now, int from, int most) {
+    static StepLine line(Step step, Project project, Instant now) {
         return new StepLine(
                 step.number(),
                 Ago.of(step.at(), now),
                 step.who(),
                 step.why(),
                 step.undoes(),
-                takenBack.get(step.number()),
+                step.takenBackBy(),
                 step.changes().stream()
-                        .skip(from)
-                        .limit(most)
                         .map(change -> ChangeLine.of(change, project))
                         .toList(),
-                step.changes().size());
+                step.count());
     }
 }

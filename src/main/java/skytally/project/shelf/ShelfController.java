@@ -23,8 +23,10 @@ import org.springframework.web.servlet.ModelAndView;
 import skytally.project.KeptProject;
 import skytally.project.NoSuchProjectException;
 import skytally.project.Project;
+import skytally.project.ProjectClashException;
 import skytally.project.Projects;
 import skytally.project.Saving;
+import skytally.project.entry.WhoCookie;
 import skytally.project.transfer.ProjectFile;
 import skytally.project.transfer.ProjectFileException;
 import skytally.web.InvalidInputException.Fault;
@@ -67,7 +69,7 @@ class ShelfController {
         page.addObject("samples", Samples.all());
         page.addObject("faults", faults);
         page.addObject("typedTitle", title);
-        page.addObject("who", TypedName.last(request));
+        page.addObject("who", WhoCookie.in(request));
         if (!faults.isEmpty()) {
             page.setStatus(HttpStatus.BAD_REQUEST);
         }
@@ -84,7 +86,7 @@ class ShelfController {
         if (!faults.isEmpty()) {
             return page(faults, title, request);
         }
-        String name = TypedName.taken(who, response);
+        String name = WhoCookie.taken(who, response);
         Project project = Project.named(UUID.randomUUID(), title.strip());
         projects.add(project, Saving.by(name, say("shelf.why.new")));
         return to(project.id(), "added");
@@ -122,7 +124,7 @@ class ShelfController {
         }
         Optional<KeptProject> kept = projects.find(opened.id());
         if (kept.isEmpty()) {
-            projects.add(opened, Saving.by(TypedName.last(request), say("shelf.why.file")));
+            projects.add(opened, Saving.by(WhoCookie.in(request), say("shelf.why.file")));
             return to(opened.id(), "opened");
         }
         if (kept.get().project().equals(opened)) {
@@ -161,7 +163,7 @@ class ShelfController {
         if (opened.isEmpty()) {
             return gone();
         }
-        projects.save(opened.get(), version, Saving.by(TypedName.last(request), say("shelf.why.replaced")));
+        projects.save(opened.get(), version, Saving.by(WhoCookie.in(request), say("shelf.why.replaced")));
         waiting.letGo(token);
         return to(opened.get().id(), "replaced");
     }
@@ -173,7 +175,7 @@ class ShelfController {
             return gone();
         }
         Project copy = Copies.withFreshId(opened.get());
-        projects.add(copy, Saving.by(TypedName.last(request), say("shelf.why.file")));
+        projects.add(copy, Saving.by(WhoCookie.in(request), say("shelf.why.file")));
         waiting.letGo(token);
         return to(copy.id(), "opened");
     }
@@ -181,9 +183,19 @@ class ShelfController {
     @PostMapping("/projects/samples/{name}")
     ModelAndView sample(@PathVariable String name, HttpServletRequest request) {
         Project sample = Samples.byName(name).orElseThrow(NoSuchProjectException::new);
-        Project kept = projects.find(sample.id()).isEmpty() ? sample : Copies.withFreshId(sample);
-        projects.add(kept, Saving.by(TypedName.last(request), say("shelf.why.sample")));
-        return to(kept.id(), "sample");
+        return to(
+                added(sample, Saving.by(WhoCookie.in(request), say("shelf.why.sample")))
+                        .id(),
+                "sample");
+    }
+
+    /** Under its own id the first time, even where two open it at once; as a copy ever after. */
+    private Project added(Project sample, Saving saving) {
+        try {
+            return projects.add(sample, saving).project();
+        } catch (ProjectClashException keptAlready) {
+            return projects.add(Copies.withFreshId(sample), saving).project();
+        }
     }
 
     private static ModelAndView to(UUID id, String done) {

@@ -60,37 +60,6 @@ class ShelfBrowserTest {
     }
 
     @Test
-    void canBeReadWideAndNarrowInEveryTheme() {
-        try (Browser browser = Browser.on(port)) {
-            browser.open("/projects");
-            browser.driver()
-                    .findElement(By.xpath("//li[contains(., 'Ferrin')]//button"))
-                    .sendKeys(Keys.ENTER);
-            browser.awaitText(By.tagName("h1"), "Ferrin Lane");
-            String front = browser.driver()
-                    .getCurrentUrl()
-                    .replaceAll("^http://[^/]+", "")
-                    .replaceAll("\\?.*", "");
-            List<String> pages = List.of("/projects", front, front + "/history", front + "/delete");
-            for (String theme : List.of("day", "dark", "telescope")) {
-                for (int width : new int[] {Browser.WIDE, Browser.NARROW}) {
-                    for (int i = 0; i < pages.size(); i++) {
-                        browser.width(width);
-                        browser.open(pages.get(i) + "?theme=" + theme);
-                        browser.screenshot("projects-" + i + "-" + width + "-" + theme, width);
-                        assertThat(browser.accessibilityFaults())
-                                .as(pages.get(i) + " " + theme)
-                                .isEmpty();
-                        assertThat(browser.scrollsSideways())
-                                .as("%s at %d scrolls sideways", pages.get(i), width)
-                                .isFalse();
-                    }
-                }
-            }
-        }
-    }
-
-    @Test
     void tellALongSaveOnAPageOfItsOwn() {
         try (Browser browser = Browser.on(port)) {
             browser.open("/projects");

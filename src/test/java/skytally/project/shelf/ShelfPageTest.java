@@ -3,7 +3,14 @@ package skytally.project.shelf;
 import static org.assertj.core.api.Assertions.assertThat;
 
 import java.nio.charset.StandardCharsets;
+import java.util.ArrayList;
+import java.util.Collections;
+import java.util.List;
 import java.util.UUID;
+import java.util.concurrent.Callable;
+import java.util.concurrent.ExecutorService;
+import java.util.concurrent.Executors;
+import java.util.concurrent.Future;
 import org.junit.jupiter.api.BeforeEach;
 import org.junit.jupiter.api.DisplayName;
 import org.junit.jupiter.api.Test;
@@ -52,7 +59,8 @@ class ShelfPageTest {
         assertThat(list.body())
                 .contains("/projects/" + front.id(), "just now", "aria-current=\"page\"")
                 .contains("value=\"A. Planner\"");
-        assertThat(projects.history(UUID.fromString(front.id())).get(0).who()).isEqualTo("A. Planner");
+        assertThat(Cases.history(projects, UUID.fromString(front.id())).get(0).who())
+                .isEqualTo("A. Planner");
     }
 
     @Test
@@ -120,7 +128,7 @@ class ShelfPageTest {
         assertThat(list.path()).isEqualTo("/projects?done=deleted");
         assertThat(list.body()).contains("The project and its history are deleted.");
         assertThat(visitor.get(path).status()).isEqualTo(404);
-        assertThat(projects.history(kept.project().id())).isEmpty();
+        assertThat(Cases.history(projects, kept.project().id())).isEmpty();
     }
 
     private String version(String path) throws Exception {
@@ -154,6 +162,21 @@ class ShelfPageTest {
     }
 
     @Test
+    void openASampleForSixPeopleAtOnce() throws Exception {
+        UUID id = Samples.byName("ferrin-lane").orElseThrow().id();
+        projects.find(id).ifPresent(kept -> projects.delete(id, kept.version()));
+        ExecutorService people = Executors.newFixedThreadPool(6);
+        Callable<Page> opening = () -> new Visitor(port).post("/projects/samples/ferrin-lane");
+        List<String> opened = new ArrayList<>();
+        for (Future<Page> page : people.invokeAll(Collections.nCopies(6, opening))) {
+            assertThat(page.get().status()).isEqualTo(200);
+            opened.add(page.get().id());
+        }
+        people.shutdown();
+        assertThat(opened).doesNotHaveDuplicates().contains(id.toString());
+    }
+
+    @Test
     void opensAFileAndSaysWhenItHoldsWhatIsKeptAlready() throws Exception {
         Project project = Copies.withFreshId(Cases.aSportsGround());
 
@@ -162,7 +185,7 @@ class ShelfPageTest {
         assertThat(opened.body()).contains("D1: Luminaire schedule, revision A, 2026-10-01, from the club");
         Page again = visitor.upload("x.skytally.json", ProjectFile.write(project));
         assertThat(again.path()).endsWith("?done=same");
-        assertThat(projects.history(project.id())).hasSize(1);
+        assertThat(Cases.history(projects, project.id())).hasSize(1);
     }
 
     @Test
@@ -183,7 +206,7 @@ class ShelfPageTest {
         Page replaced = visitor.post(askAgain.path() + "/replace", "version", askAgain.version());
         assertThat(replaced.path()).isEqualTo("/projects/" + other.id() + "?done=replaced");
         assertThat(projects.find(other.id()).orElseThrow().project()).isEqualTo(other);
-        assertThat(projects.history(other.id())).hasSize(2);
+        assertThat(Cases.history(projects, other.id())).hasSize(2);
     }
 
     @Test
@@ -257,6 +280,55 @@ class ShelfPageTest {
                     .doesNotContain("<img")
                     .contains("[[${7*7}]]");
         }
+    }
+
+    /** Values are text in the file; one that is no number, or beyond all numbers, is shown as it is and never fails. */
+    @ParameterizedTest
+    @ValueSource(
+            strings = {
+                "<img src=x onerror=alert(1)>",
+                "NaN",
+                "Infinity",
+                "-Infinity",
+                "1e308",
+                "1e999999999",
+                "-1e-400",
+                "0x10",
+                "999999999999999999999999999999999999999999999999",
+                "’; DROP TABLE project; --"
+            })
+    void answersEveryPageWhateverTheValuesAre(String value) throws Exception {
+        String quoted = "\"" + value + "\"";
+        String file = new String(
+                        ProjectFile.write(Copies.withFreshId(
+                                Samples.byName("ferrin-lane").orElseThrow())),
+                        StandardCharsets.UTF_8)
+                .replaceAll(
+                        "(\"(?:value|unit|low|high)\" : )\"[^\"]*\"",
+                        "$1" + java.util.regex.Matcher.quoteReplacement(quoted));
+        Page opened = visitor.upload("x.skytally.json", file.getBytes(StandardCharsets.UTF_8));
+        if (opened.status() == 400) {
+            assertThat(opened.body()).contains("The file was not opened, and nothing was kept. /");
+            return;
+        }
+        assertThat(opened.status()).isEqualTo(200);
+
+        for (String page : ProjectPages.OF_FERRIN_LANE) {
+            Page answer = visitor.get("/projects/" + opened.id() + page);
+            assertThat(answer.status()).as(page).isEqualTo(200);
+            assertThat(answer.body()).as(page).doesNotContain("<img");
+        }
+    }
+
+    @ParameterizedTest
+    @ValueSource(strings = {"NaN", "Infinity", "1e308", "-1", "360"})
+    void refusesADirectionThatIsNone(String bearing) throws Exception {
+        int before = projects.list().size();
+        String good = new String(ProjectFile.write(Copies.withFreshId(Cases.aSportsGround())), StandardCharsets.UTF_8);
+
+        refused(good.replace("\"bearingDeg\" : \"200.0\"", "\"bearingDeg\" : \"" + bearing + "\""), "/places/0/looks/0: ");
+        refused(good.replace("\"bearingDeg\" : \"200.0\"", "\"bearingDeg\" : NaN"), "not JSON at line");
+        assertThat(projects.list()).hasSize(before);
     }
 
     @Test
