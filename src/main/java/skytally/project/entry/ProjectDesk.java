@@ -8,10 +8,12 @@ import org.springframework.web.server.ResponseStatusException;
 import org.springframework.web.servlet.ModelAndView;
 import org.springframework.web.servlet.view.RedirectView;
 import org.springframework.web.util.UriComponentsBuilder;
+import skytally.project.Attachment;
 import skytally.project.KeptProject;
 import skytally.project.Project;
 import skytally.project.Projects;
 import skytally.project.Saving;
+import skytally.project.WholeProject;
 
 /** Opens a project for a page, saves what the page changed, and leads on. */
 @Component
@@ -46,6 +48,16 @@ public class ProjectDesk {
      */
     public void save(KeptProject opened, Project changed, String who, String why, Object... with) {
         projects.save(changed, opened.version(), Saving.by(who, words.say(why, with)));
+    }
+
+    /** Saves it with files that are new. */
+    public void save(KeptProject opened, WholeProject changed, String who, String why, Object... with) {
+        projects.save(changed, opened.version(), Saving.by(who, words.say(why, with)));
+    }
+
+    /** The bytes of a file that one of the project's documents has. */
+    public byte[] bytes(UUID id, Attachment file) {
+        return projects.bytes(id, file.sha256()).orElseThrow(() -> new ResponseStatusException(HttpStatus.NOT_FOUND));
     }
 
     /** A page of the project, with what was just done if the address says so. */

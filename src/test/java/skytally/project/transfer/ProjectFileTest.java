@@ -10,8 +10,11 @@ import org.junit.jupiter.api.DisplayName;
 import org.junit.jupiter.api.Test;
 import org.junit.jupiter.params.ParameterizedTest;
 import org.junit.jupiter.params.provider.CsvSource;
+import skytally.project.Attachment;
+import skytally.project.Attachments;
 import skytally.project.Cases;
 import skytally.project.Claim;
+import skytally.project.Document;
 import skytally.project.LuminaireType;
 import skytally.project.Party;
 import skytally.project.Project;
@@ -19,6 +22,7 @@ import skytally.project.Scheme;
 import skytally.project.Source;
 import skytally.project.Stated;
 import skytally.project.Values;
+import skytally.project.WholeProject;
 
 @DisplayName("Project files")
 class ProjectFileTest {
@@ -53,6 +57,71 @@ class ProjectFileTest {
         assertThatThrownBy(() -> ProjectFile.read(changed.getBytes(StandardCharsets.UTF_8)))
                 .isInstanceOf(ProjectFileException.class)
                 .hasMessage(message);
+    }
+
+    private static final byte[] PLAN = "%PDF-1.7 a plan".getBytes(StandardCharsets.UTF_8);
+    private static final byte[] TABLE = "mark,lm\nA1,96000\n".getBytes(StandardCharsets.UTF_8);
+
+    /** Two documents with the same file and one with another. */
+    private static WholeProject withFiles() {
+        Attachment plan = Attachment.of("plan.pdf", PLAN);
+        return new WholeProject(
+                Cases.aSportsGround()
+                        .withDocuments(List.of(
+                                new Document("D1", "Plan", "", "", "").with(plan),
+                                new Document("D2", "Plan again", "", "", "").with(plan),
+                                new Document("D3", "Table", "", "", "").with(Attachment.of("t.csv", TABLE)),
+                                new Document("D4", "Letter", "", "", ""))),
+                Attachments.NONE.with(TABLE).with(PLAN));
+    }
+
+    @Test
+    void carryTheBytesOfEachFileOnceAndOpenToTheSame() throws ProjectFileException {
+        byte[] written = ProjectFile.write(withFiles());
+        WholeProject opened = ProjectFile.open(written);
+        assertThat(opened.project()).isEqualTo(withFiles().project());
+        // by sha256sum of GNU coreutils 9.1, of the same bytes
+        assertThat(opened.attachments().hashes())
+                .containsExactly(
+                        "3cd67d980c9889915eb2d36e15243e15437ff5487176fe2da377b88ba05ae769",
+                        "e2acaa49ee6d17e7cab5e14fde88de3300654b544c104fc5a6fbc0069a3da11d");
+        assertThat(ProjectFile.write(opened)).isEqualTo(written);
+        assertThat(ProjectFile.size(opened.project(), ProjectFile.write(opened.project())))
+                .isGreaterThanOrEqualTo(written.length);
+        assertThat(ProjectFile.read(ProjectFile.write(opened.project()))).isEqualTo(opened.project());
+    }
+
+    @ParameterizedTest(name = "{0} becomes {1}: {2}")
+    @CsvSource(delimiter = '|', textBlock = """
+            JVBERi0xLjcgYSBwbGFu     | JVBERi0xLjcgYSBwbGFO     | /attachments/0/sha256: does not fit the bytes beside it: the file was changed or cut. Take it again from where it was saved.
+            JVBERi0xLjcgYSBwbGFu     | JVBERi0xL*cgYSBwbGFu     | /attachments/0/base64: is not base64: Illegal base64 character 2a.
+            "size" : 15              | "size" : 16              | /documents/0/file: says 16 bytes of application/pdf, but the attachment has 15 bytes of application/pdf.
+            "size" : 15              | "size" : 6000000         | /documents/0/file: A file has 1 to 5242880 bytes, not 6000000.
+            "mediaType" : "text/csv" | "mediaType" : "text/html" | /documents/2/file: says 17 bytes of text/html, but the attachment has 17 bytes of text/csv.
+            "name" : "plan.pdf"      | "name" : "plan.png"      | /documents/0/file: The file “plan.png” cannot be kept. A file ends in one of .pdf, .png, .jpg, .jpeg, .xlsx, .csv, .txt, .tsv, .ies, .ldt and holds what its end says.
+            "name" : "plan.pdf"      | "name" : "../plan.pdf"   | /documents/0/file: The name of a file has no slash and no control character.
+            "attachments"            | "attachement"            | /documents/0/file/sha256: names a file that is not among the attachments.
+            "mark" : "D4",           | "mark" : "D4", "file" : { "name" : "a.pdf", "mediaType" : "application/pdf", "size" : 1, "sha256" : "x" }, | /documents/3/file: A hash has 64 small hexadecimal digits, not “x”.
+            """)
+    void refuseAFileThatIsNotWhatItsDocumentSays(String found, String instead, String message) {
+        String text = new String(ProjectFile.write(withFiles()), StandardCharsets.UTF_8);
+        assertThat(text).contains(found);
+        String changed = text.replaceFirst(java.util.regex.Pattern.quote(found), instead);
+        assertThatThrownBy(() -> ProjectFile.open(changed.getBytes(StandardCharsets.UTF_8)))
+                .isInstanceOf(ProjectFileException.class)
+                .hasMessage(message);
+    }
+
+    @Test
+    void refuseAFileThatNoDocumentNames() {
+        WholeProject whole = withFiles();
+        String text = new String(ProjectFile.write(whole), StandardCharsets.UTF_8);
+        Project without = whole.project().withDocuments(List.of());
+        String tail = text.substring(text.indexOf("  \"attachments\""));
+        String orphaned =
+                new String(ProjectFile.write(without), StandardCharsets.UTF_8).replaceFirst("\n}\n$", ",\n") + tail;
+        assertThatThrownBy(() -> ProjectFile.open(orphaned.getBytes(StandardCharsets.UTF_8)))
+                .hasMessageStartingWith("/attachments: holds a file that no document names: ");
     }
 
     @Test
