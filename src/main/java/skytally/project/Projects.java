@@ -247,8 +247,7 @@ public class Projects {
     private static String text(Project project) {
         byte[] text = ProjectFile.write(project);
         if (ProjectFile.size(project, text) > ProjectFile.LARGEST_BYTES) {
-            throw new IllegalArgumentException("The project with its files would be larger than 25 MB, the most a"
-                    + " project file may be. Leave out a file or some of the lights");
+            throw new ProjectTooLargeException();
         }
         return new String(text, StandardCharsets.UTF_8);
     }

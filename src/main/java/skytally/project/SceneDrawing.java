@@ -31,9 +31,9 @@ import skytally.spectrum.SpectralClasses;
  * Draws the scene of one scheme of a project, and is the only class that does: typed units become SI, a light's own
  * height and tilt come before its type's, and what is not known is stood in for by the catalogue.
  *
- * <p>Heights are reckoned from the lowest ground of any light or place, so that none is negative. Existing lights stay
+ * <p>Outputs are those stated; where none is, those that the hours give. Heights are reckoned from the lowest ground of any light or place, so that none is negative. Existing lights stay
  * unless they are marked as removed. A type without lumens and without watts is left out and named; a light without a
- * position stands at the reference point and is named.
+ * position stands at the middle of the site, or at the reference point where no outline is known, and is named.
  */
 public final class SceneDrawing {
 
@@ -159,7 +159,7 @@ public final class SceneDrawing {
         }
         if (count > lights.size()) {
             unplaced.add(type.mark());
-            lamps.add(drawn.atReference(count - lights.size()));
+            lamps.add(drawn.atCentre(count - lights.size()));
         }
     }
 
@@ -224,9 +224,12 @@ public final class SceneDrawing {
             return lamp(light.mark(), 1, at, attitude(light.values()));
         }
 
-        Lamp atReference(int count) {
+        Lamp atCentre(int count) {
             double height = siteGroundM() - baseM + required("mountingHeight").number();
-            return lamp(mark + "-unplaced", count, new Position(0, 0, height), attitude(Values.NONE));
+            Outline.Corner centre =
+                    Outline.of(project.site()).map(Outline::centroid).orElse(new Outline.Corner(0, 0));
+            Position at = new Position(centre.eastM(), centre.northM(), height);
+            return lamp(mark + "-unplaced", count, at, attitude(Values.NONE));
         }
 
         private Attitude attitude(Values own) {
@@ -237,6 +240,11 @@ public final class SceneDrawing {
             double roll =
                     number(Subject.LIGHT, "roll", own).orElse(required("roll").number());
             return new Attitude(bearing, tilt, roll);
+        }
+
+        private double output() {
+            return OutputByHours.reading(period.outputField, values, project.site())
+                    .number();
         }
 
         private double own(Placement light, String field) {
@@ -252,8 +260,7 @@ public final class SceneDrawing {
                     count,
                     at,
                     attitude,
-                    new LuminousFlux(
-                            lumens.number() * required(period.outputField).number() / 100),
+                    new LuminousFlux(lumens.number() * output() / 100),
                     shape.distribution(),
                     SpectralClasses.byId(spectralClass.text()).orElseThrow().spectrum(),
                     size,

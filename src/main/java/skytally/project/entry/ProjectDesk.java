@@ -66,7 +66,9 @@ public class ProjectDesk {
         page.addObject("kept", kept);
         String done = typed.text("done");
         if (done.matches("[a-z-]{1,40}")) {
-            words.find("done." + done).ifPresent(said -> page.addObject("done", said));
+            String many = typed.text("many");
+            words.find("done." + done, many.matches("\\d{1,6}") ? Integer.parseInt(many) : 0)
+                    .ifPresent(said -> page.addObject("done", said));
         }
         return page;
     }
@@ -80,15 +82,27 @@ public class ProjectDesk {
 
     /** On to a page of the project, which will say what was done. */
     public ModelAndView on(KeptProject kept, String done, String... path) {
-        return on(kept, done, new Heading("", "", "", ""), path);
+        return on(kept, done, Heading.NONE, path);
     }
 
     /** On to a page whose form begins with the same document. */
     public ModelAndView on(KeptProject kept, String done, Heading heading, String... path) {
+        return on(kept, done, 0, heading, path);
+    }
+
+    /**
+     * On to a page that will say how many it was done to.
+     *
+     * @param many goes into the message
+     */
+    public ModelAndView on(KeptProject kept, String done, int many, Heading heading, String... path) {
         UriComponentsBuilder address = UriComponentsBuilder.fromPath("/projects")
                 .pathSegment(kept.project().id().toString())
                 .pathSegment(path)
                 .queryParam("done", done);
+        if (many > 0) {
+            address.queryParam("many", many);
+        }
         if (!heading.document().isEmpty()) {
             address.queryParam("document", "{document}").queryParam("party", "{party}");
         }

@@ -132,16 +132,18 @@ public final class ProjectFile {
     }
 
     /**
-     * Opens a project file with the bytes of its files.
+     * Opens a project file with the bytes of its files. Its values must fit the catalogue of fields.
      *
      * @throws ProjectFileException if it is not one, with the path and the reason
      */
     public static WholeProject open(byte[] bytes) throws ProjectFileException {
-        return FileObject.made(new FileObject(tree(bytes), ""), ProjectFile::whole);
+        WholeProject whole = FileObject.made(new FileObject(tree(bytes), ""), ProjectFile::whole);
+        Catalogued.require(whole.project());
+        return whole;
     }
 
     /**
-     * Reads the text of a project without the bytes of its files.
+     * Reads the text of a project without the bytes of its files, as it is kept here.
      *
      * @throws ProjectFileException if it is not one, with the path and the reason
      */
@@ -323,7 +325,10 @@ public final class ProjectFile {
                                 look.text("name"), number(look, "bearingDeg"), number(look, "altitudeDeg"))),
                 object.list(
                         "horizon",
-                        point -> new Place.HorizonPoint(number(point, "bearingDeg"), number(point, "altitudeDeg"))));
+                        point -> new Place.HorizonPoint(number(point, "bearingDeg"), number(point, "altitudeDeg"))),
+                object.list(
+                        "ground",
+                        point -> new Place.GroundPoint(number(point, "distanceM"), number(point, "heightM"))));
     }
 
     private static double number(FileObject object, String member) throws ProjectFileException {
@@ -449,6 +454,14 @@ public final class ProjectFile {
                 ObjectNode one = horizon.addObject();
                 one.put("bearingDeg", Double.toString(point.bearingDeg()));
                 one.put("altitudeDeg", Double.toString(point.altitudeDeg()));
+            }
+        }
+        if (!place.ground().isEmpty()) {
+            ArrayNode ground = node.putArray("ground");
+            for (Place.GroundPoint point : place.ground()) {
+                ObjectNode one = ground.addObject();
+                one.put("distanceM", Double.toString(point.distanceM()));
+                one.put("heightM", Double.toString(point.heightM()));
             }
         }
     }

@@ -17,6 +17,7 @@ import skytally.project.Claim;
 import skytally.project.Document;
 import skytally.project.LuminaireType;
 import skytally.project.Party;
+import skytally.project.Place;
 import skytally.project.Project;
 import skytally.project.Scheme;
 import skytally.project.Source;
@@ -110,6 +111,64 @@ class ProjectFileTest {
         assertThatThrownBy(() -> ProjectFile.open(changed.getBytes(StandardCharsets.UTF_8)))
                 .isInstanceOf(ProjectFileException.class)
                 .hasMessage(message);
+    }
+
+    @ParameterizedTest(name = "{0} becomes {1}: {2}")
+    @CsvSource(delimiter = '|', textBlock = """
+            "lumens" : {             | "lumen" : {              | /schemes/1/types/0/values/lumen: is not known to this version. Remove it, or open the file with the version that wrote it.
+            "value" : "96000"        | "value" : "many"         | /schemes/1/types/0/values/lumens/claims/0/value: “many” is not a number.
+            "unit" : "lm"            | "unit" : "cd"            | /schemes/1/types/0/values/lumens/claims/0/value: has the unit “cd”, but must have one of lm.
+            "value" : "52.4"         | "value" : "92.4"         | /site/latitude/claims/0/value: “92.4” is outside what may be typed, -90 to 90 °.
+            "low" : "60"             | "low" : "x"              | /schemes/1/types/0/values/tilt/claims/0/low: “x” is not a number.
+            "value" : "86"           | "value" : "1e9"          | /places/0/values/north/claims/0/value: “1e9” is outside what may be typed, -1000000 to 1000000 m.
+            """)
+    void refuseAValueThatItsFieldDoesNotTake(String found, String instead, String message) {
+        assertThat(TEXT).contains(found);
+        String changed = TEXT.replaceFirst(java.util.regex.Pattern.quote(found), instead);
+        assertThatThrownBy(() -> ProjectFile.open(changed.getBytes(StandardCharsets.UTF_8)))
+                .isInstanceOf(ProjectFileException.class)
+                .hasMessage(message);
+    }
+
+    @ParameterizedTest(name = "{0} of {1}: {2}")
+    @CsvSource(delimiter = '|', textBlock = """
+            outline  | 0 0; 10 10; 10 0; 0 10 | The edge from line 3 to line 4 crosses or touches the edge from line 1 to line 2. Put the corners in their turn around the site.
+            timeZone | Nowhere/Town           | “Nowhere/Town” is no zone of time such as Europe/London or +01:00.
+            curfew   | 24:30                  | “24:30” is no time of day such as 23:00.
+            zone     | E9                     | “E9” is not one of E0, E1, E2, E3, E4.
+            drives   | 2.5                    | “2.5” is not a whole number.
+            """)
+    void refuseOfASiteWhatItsFieldsDoNotTake(String field, String value, String message) {
+        String unit = field.equals("outline") ? "m" : "";
+        Project project = Cases.aSportsGround()
+                .withSite(new Values(
+                        Map.of(field, Stated.of(Claim.given(value, unit, Source.reason("test"), Party.APPLICANT)))));
+        assertThatThrownBy(() -> ProjectFile.open(ProjectFile.write(project)))
+                .isInstanceOf(ProjectFileException.class)
+                .hasMessage("/site/" + field + "/claims/0/value: " + message);
+    }
+
+    @Test
+    void keepTheGroundTowardAPlaceAndRefuseWhatDoesNotRise() throws ProjectFileException {
+        Project ground = Cases.aSportsGround();
+        Project hilly = ground.withPlaces(List.of(new Place(
+                "VA1",
+                Values.NONE,
+                List.of(),
+                List.of(),
+                List.of(new Place.GroundPoint(0, 96), new Place.GroundPoint(1000, 92.5)))));
+        String text = new String(ProjectFile.write(hilly), StandardCharsets.UTF_8);
+        assertThat(ProjectFile.open(text.getBytes(StandardCharsets.UTF_8)).project())
+                .isEqualTo(hilly);
+        assertThatThrownBy(() ->
+                        ProjectFile.read(text.replace("\"1000.0\"", "\"0.0\"").getBytes(StandardCharsets.UTF_8)))
+                .hasMessage("/places/0: Each distance of the ground is larger than the one before; 0.0 is not.");
+        assertThatThrownBy(() ->
+                        ProjectFile.read(text.replace("\"92.5\"", "\"9200.5\"").getBytes(StandardCharsets.UTF_8)))
+                .hasMessage("/places/0/ground/1: A point of the ground lies 0 to 1000000 m away and -430 to 9000 m"
+                        + " above the sea, not 1000.0 and 9200.5.");
+        assertThat(Difference.applied(ground, Difference.between(ground, hilly)))
+                .isEqualTo(hilly);
     }
 
     @Test
