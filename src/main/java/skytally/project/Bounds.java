@@ -8,6 +8,10 @@ public final class Bounds {
     public static final int PLACES = 200;
     public static final int SCHEMES = 6;
     public static final int DOCUMENTS = 500;
+    /** Bytes of one file of a document. */
+    public static final int FILE_BYTES = 5 * 1024 * 1024;
+    /** Lines of one list typed as text. */
+    public static final int LINES = 1000;
     /** Characters of text in one field. */
     public static final int TEXT = 65_536;
 

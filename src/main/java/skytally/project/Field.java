@@ -10,6 +10,7 @@ import org.jspecify.annotations.Nullable;
  *
  * @param subject  whose field it is
  * @param name     in files and addresses
+ * @param group    the heading it stands under on its page, or empty
  * @param label    in words
  * @param kind     what may be typed
  * @param units    that may be chosen, the first the one results are reckoned in; none for words and plain numbers
@@ -21,6 +22,7 @@ import org.jspecify.annotations.Nullable;
 public record Field(
         Subject subject,
         String name,
+        String group,
         String label,
         Kind kind,
         List<String> units,
@@ -39,13 +41,34 @@ public record Field(
 
     /** What may be typed. */
     public enum Kind {
+        /** Words on one line. */
         TEXT,
+        /** Words on several. */
+        NOTE,
         WHOLE,
         NUMBER,
-        CHOICE;
+        CHOICE,
+        /** A zone of time: by its name, or an offset. */
+        ZONE,
+        /** A time of day. */
+        CLOCK,
+        /** {@link Outline}: a corner a line. */
+        CORNERS,
+        /** {@link skytally.project.hours.Hours}: a row a line. */
+        SCHEDULE;
 
         public boolean isNumber() {
             return this == WHOLE || this == NUMBER;
+        }
+
+        /** Whether what is typed has a unit beside it, if its field has units. */
+        public boolean hasUnit() {
+            return isNumber() || this == CORNERS;
+        }
+
+        /** Whether what is typed stands on several lines. */
+        public boolean isLines() {
+            return this == NOTE || this == CORNERS || this == SCHEDULE;
         }
     }
 

@@ -68,6 +68,7 @@ public final class Fields {
         return new Field(
                 Subject.valueOf(row.get("subject").toUpperCase(Locale.ROOT)),
                 row.get("field"),
+                row.get("group"),
                 row.get("label"),
                 Kind.valueOf(row.get("kind").toUpperCase(Locale.ROOT)),
                 parts(row.get("units")),

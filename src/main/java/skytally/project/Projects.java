@@ -30,11 +30,13 @@ public class Projects {
 
     private final ProjectRows rows;
     private final ChangeRows changes;
+    private final AttachmentRows attachments;
     private final Clock clock;
 
-    Projects(ProjectRows rows, ChangeRows changes) {
+    Projects(ProjectRows rows, ChangeRows changes, AttachmentRows attachments) {
         this.rows = rows;
         this.changes = changes;
+        this.attachments = attachments;
         this.clock = Clock.systemUTC();
     }
 
@@ -70,19 +72,27 @@ public class Projects {
         throw new NoSuchProjectException();
     }
 
-    /**
-     * Keeps a new project.
-     *
-     * @throws ProjectClashException    if one with its id is kept already; nothing is changed then
-     * @throws IllegalArgumentException if its title is empty or too long
-     */
+    /** Keeps a new project none of whose documents has a file. */
     @Transactional
     public KeptProject add(Project project, Saving saving) {
+        return add(new WholeProject(project, Attachments.NONE), saving);
+    }
+
+    /**
+     * Keeps a new project with its files.
+     *
+     * @throws IllegalArgumentException if one with its id is kept already, its title is empty or too long, the bytes of
+     *                                  a file are missing, or it would not fit into a project file
+     */
+    @Transactional
+    public KeptProject add(WholeProject whole, Saving saving) {
+        Project project = whole.project();
         requireTitle(project);
         if (rows.existsById(project.id())) {
             throw new ProjectClashException();
         }
         ProjectRow row = inserted(new ProjectRow(project.id(), project.title(), text(project), now()));
+        keep(whole);
         record(project.id(), Difference.between(Project.named(project.id(), ""), project), saving);
         return kept(row);
     }
@@ -96,14 +106,23 @@ public class Projects {
         }
     }
 
+    /** Saves a project all of whose files are kept already. */
+    @Transactional
+    public KeptProject save(Project project, long openedAt, Saving saving) {
+        return save(new WholeProject(project, Attachments.NONE), openedAt, saving);
+    }
+
     /**
      * Saves a project over the version it was opened at.
      *
+     * @param whole    with the bytes of those of its files that are new
      * @param openedAt the version its editor started from
-     * @throws ProjectClashException if it has been saved since; nothing is changed then
+     * @throws ProjectClashException    if it has been saved since; nothing is changed then
+     * @throws IllegalArgumentException if the bytes of a file are missing, or it would not fit into a project file
      */
     @Transactional
-    public KeptProject save(Project project, long openedAt, Saving saving) {
+    public KeptProject save(WholeProject whole, long openedAt, Saving saving) {
+        Project project = whole.project();
         requireTitle(project);
         ProjectRow row = rows.findById(project.id()).orElseThrow(ProjectClashException::new);
         if (row.version() != openedAt) {
@@ -114,8 +133,27 @@ public class Projects {
             return kept(row);
         }
         row.replace(project.title(), text(project), now());
+        keep(whole);
         record(project.id(), made, saving);
         return kept(rows.saveAndFlush(row));
+    }
+
+    /** A kept project with the bytes of its files. */
+    @Transactional(readOnly = true)
+    public WholeProject whole(Project project) {
+        Attachments files = Attachments.NONE;
+        for (String hash : Attachments.namedBy(project).toList()) {
+            files = files.with(bytes(project.id(), hash)
+                    .orElseThrow(() -> new IllegalStateException(
+                            "Project " + project.id() + " is not kept whole: a file is missing, " + hash)));
+        }
+        return new WholeProject(project, files);
+    }
+
+    /** The bytes of one file of a kept project. */
+    @Transactional(readOnly = true)
+    public Optional<byte[]> bytes(UUID id, String sha256) {
+        return attachments.findById(new AttachmentRow.Key(id, sha256)).map(AttachmentRow::content);
     }
 
     /**
@@ -220,6 +258,18 @@ public class Projects {
         rows.delete(row);
     }
 
+    private void keep(WholeProject whole) {
+        UUID id = whole.project().id();
+        for (String hash : Attachments.namedBy(whole.project()).toList()) {
+            if (!attachments.existsById(new AttachmentRow.Key(id, hash))) {
+                byte[] content = whole.attachments()
+                        .bytes(hash)
+                        .orElseThrow(() -> new IllegalArgumentException("The bytes of a file are missing: " + hash));
+                attachments.save(new AttachmentRow(id, hash, content));
+            }
+        }
+    }
+
     private void record(UUID id, List<Difference.Change> made, Saving saving) {
         long step = changes.lastStep(id).orElse(0L) + 1;
         Instant at = now();
@@ -237,8 +287,13 @@ public class Projects {
         }
     }
 
+    /** The text of its row, if it and its files would fit into a project file. */
     private static String text(Project project) {
-        return new String(ProjectFile.write(project), StandardCharsets.UTF_8);
+        byte[] text = ProjectFile.write(project);
+        if (ProjectFile.size(project, text) > ProjectFile.LARGEST_BYTES) {
+            throw new ProjectTooLargeException();
+        }
+        return new String(text, StandardCharsets.UTF_8);
     }
 
     private static void requireTitle(Project project) {

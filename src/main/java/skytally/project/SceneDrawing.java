@@ -34,9 +34,10 @@ import skytally.spectrum.SpectralClasses;
  * Draws the scene of one scheme of a project, and is the only class that does: typed units become SI, a light's own
  * height and tilt come before its type's, and what is not known is stood in for by the catalogue.
  *
- * <p>Heights are reckoned from the lowest ground of any light or place, so that none is negative. Existing lights stay
- * unless they are marked as removed. A type without lumens and without watts, or without a count and a position, is left
- * out and named; a light without a position counts for the sky alone, from the middle of the site, and is named.
+ * <p>Outputs are those stated; where none is, those that the hours give. Heights are reckoned from the lowest ground of
+ * any light or place, so that none is negative. Existing lights stay unless they are marked as removed. A type without
+ * lumens and without watts, or without a count and a position, is left out and named; a light without a position counts
+ * for the sky alone, from the middle of the site (or the reference point where no outline is known), and is named.
  */
 public final class SceneDrawing {
 
@@ -273,8 +274,12 @@ public final class SceneDrawing {
 
         Lamp atCentre(int count) {
             double ground = siteGroundM() - baseM;
-            Position at =
-                    new Position(0, 0, ground + required("mountingHeight").number());
+            Outline.Corner centre =
+                    Outline.of(project.site()).map(Outline::centroid).orElse(new Outline.Corner(0, 0));
+            Position at = new Position(
+                    centre.eastM(),
+                    centre.northM(),
+                    ground + required("mountingHeight").number());
             return lamp(mark + "-unplaced", count, at, ground, attitude(Values.NONE));
         }
 
@@ -286,6 +291,11 @@ public final class SceneDrawing {
             double roll =
                     number(Subject.LIGHT, "roll", own).orElse(required("roll").number());
             return new Attitude(bearing, tilt, roll);
+        }
+
+        private double output() {
+            return OutputByHours.reading(period.outputField, values, project.site())
+                    .number();
         }
 
         private double own(Placement light, String field) {
@@ -302,8 +312,7 @@ public final class SceneDrawing {
                     at,
                     groundM,
                     attitude,
-                    new LuminousFlux(
-                            lumens.number() * required(period.outputField).number() / 100),
+                    new LuminousFlux(lumens.number() * output() / 100),
                     shape.distribution(),
                     SpectralClasses.byId(spectralClass.text()).orElseThrow().spectrum(),
                     size,

@@ -24,3 +24,12 @@ CREATE TABLE project_change (
 );
 
 CREATE INDEX project_change_step ON project_change (project_id, step);
+
+-- The bytes of the files of documents, by their hash. They go with their project and not before, because a step back
+-- may bring a document back.
+CREATE TABLE project_attachment (
+    project_id UUID NOT NULL REFERENCES project (id) ON DELETE CASCADE,
+    sha256     VARCHAR(64) NOT NULL,
+    content    BINARY LARGE OBJECT NOT NULL,
+    PRIMARY KEY (project_id, sha256)
+);

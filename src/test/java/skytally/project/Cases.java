@@ -43,7 +43,7 @@ public final class Cases {
                                 Scheme.Kind.PROPOSED,
                                 "What is proposed",
                                 List.of(
-                                        new LuminaireType("A1", new Values(Map.of("lumens", lumens, "tiltDeg", tilt))),
+                                        new LuminaireType("A1", new Values(Map.of("lumens", lumens, "tilt", tilt))),
                                         new LuminaireType("A2", Values.NONE)),
                                 List.of(
                                         new Placement("A1-01", "A1", grid("-36", "37")),

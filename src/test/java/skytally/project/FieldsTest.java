@@ -3,7 +3,9 @@ package skytally.project;
 import static org.assertj.core.api.Assertions.assertThat;
 
 import java.math.BigDecimal;
+import java.util.ArrayList;
 import java.util.HashSet;
+import java.util.List;
 import java.util.Set;
 import java.util.stream.Stream;
 import org.junit.jupiter.api.DisplayName;
@@ -46,6 +48,20 @@ class FieldsTest {
                 }
             }
         });
+    }
+
+    /** A group told in two parts would have two headings. */
+    @Test
+    void standTogetherInTheirGroups() {
+        for (Field.Subject subject : Field.Subject.values()) {
+            List<String> groups = new ArrayList<>();
+            for (Field field : Fields.of(subject)) {
+                if (groups.isEmpty() || !groups.get(groups.size() - 1).equals(field.group())) {
+                    groups.add(field.group());
+                }
+            }
+            assertThat(groups).as(subject.name()).doesNotHaveDuplicates();
+        }
     }
 
     /** The international foot is 0.3048 m; an acre is 4046.8564224 m², by definition. */

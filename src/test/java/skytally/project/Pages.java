@@ -1,5 +1,6 @@
 package skytally.project;
 
+import java.io.ByteArrayOutputStream;
 import java.io.IOException;
 import java.net.CookieManager;
 import java.net.URI;
@@ -65,6 +66,43 @@ public final class Pages {
         return send(HttpRequest.newBuilder(URI.create(origin + path))
                 .header("Content-Type", "application/x-www-form-urlencoded")
                 .POST(HttpRequest.BodyPublishers.ofString(body.toString())));
+    }
+
+    /** Fills in the form on that page as it stands now, with a file in its input called file, and sends it to it. */
+    public Page upload(String path, String fileName, byte[] bytes, String... namesAndValues)
+            throws IOException, InterruptedException {
+        List<String> all = new ArrayList<>(List.of("version", get(path).version()));
+        all.addAll(List.of(namesAndValues));
+        return uploadTo(path, path, fileName, bytes, all.toArray(String[]::new));
+    }
+
+    /** Sends a file to another address than that of the page its form stands on. */
+    public Page uploadTo(String page, String path, String fileName, byte[] bytes, String... namesAndValues)
+            throws IOException, InterruptedException {
+        List<String> all =
+                new ArrayList<>(List.of("_csrf", first(TOKEN, get(page).body())));
+        all.addAll(List.of(namesAndValues));
+        ByteArrayOutputStream body = new ByteArrayOutputStream();
+        for (int i = 0; i < all.size(); i += 2) {
+            body.writeBytes(("--part\r\nContent-Disposition: form-data; name=\"" + all.get(i) + "\"\r\n\r\n"
+                            + all.get(i + 1) + "\r\n")
+                    .getBytes(StandardCharsets.UTF_8));
+        }
+        body.writeBytes(("--part\r\nContent-Disposition: form-data; name=\"file\"; filename=\"" + fileName
+                        + "\"\r\nContent-Type: text/html\r\n\r\n")
+                .getBytes(StandardCharsets.UTF_8));
+        body.writeBytes(bytes);
+        body.writeBytes("\r\n--part--\r\n".getBytes(StandardCharsets.UTF_8));
+        return send(HttpRequest.newBuilder(URI.create(origin + path))
+                .header("Content-Type", "multipart/form-data; boundary=part")
+                .POST(HttpRequest.BodyPublishers.ofByteArray(body.toByteArray())));
+    }
+
+    /** What stands at an address, byte for byte. */
+    public HttpResponse<byte[]> bytes(String path) throws IOException, InterruptedException {
+        return client.send(
+                HttpRequest.newBuilder(URI.create(origin + path)).GET().build(),
+                HttpResponse.BodyHandlers.ofByteArray());
     }
 
     private Page send(HttpRequest.Builder request) throws IOException, InterruptedException {

@@ -418,7 +418,8 @@ class ProjectPagesTest {
                 "20",
                 "endNorth",
                 "10");
-        assertThat(many.words()).contains("At most 20000 lights in a scheme fit, not 20012");
+        assertThat(many.words())
+                .contains("That would be 20000 lights more beside the 12 there are; at most 20000 fit in a scheme.");
 
         pages.post(page, "doing", "remove", "light", "P1", "light", "A1-01");
         assertThat(proposed().placement("P1")).isEmpty();
@@ -495,7 +496,7 @@ class ProjectPagesTest {
                 .contains("10 20");
         Pages.Page both =
                 pages.post(page, "doing", "save", "document", "D1", "distance", "100", "direction", "270", "east", "5");
-        assertThat(both.words()).contains("the coordinates were changed as well");
+        assertThat(both.words()).contains("The position was typed in two ways. Do one or the other.");
 
         pages.post(page, "doing", "rename", "mark", "V2");
         assertThat(pages.post(at + "/places/V2", "doing", "remove").words()).contains("The place was removed.");

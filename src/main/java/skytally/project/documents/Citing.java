@@ -47,8 +47,7 @@ final class Citing {
                                         .toList()))
                         .toList(),
                 project.places().stream()
-                        .map(place ->
-                                new Place(place.mark(), change.apply(place.values()), place.looks(), place.horizon()))
+                        .map(place -> place.with(change.apply(place.values())))
                         .toList());
     }
 

@@ -4,6 +4,8 @@ import java.util.ArrayList;
 import java.util.LinkedHashMap;
 import java.util.List;
 import java.util.Map;
+import org.jspecify.annotations.Nullable;
+import skytally.project.Attachment;
 import skytally.project.Document;
 import skytally.project.entry.Typed;
 import skytally.project.entry.Words;
@@ -67,8 +69,8 @@ public record DocumentForm(long version, Map<String, String> texts, List<Fault> 
     }
 
     /** The document, if its mark is one. */
-    Document document() {
-        return new Document(text("mark"), text("title"), text("date"), text("revision"), text("from"));
+    Document document(@Nullable Attachment file) {
+        return new Document(text("mark"), text("title"), text("date"), text("revision"), text("from"), file);
     }
 
     /** Of the inputs, in order. */

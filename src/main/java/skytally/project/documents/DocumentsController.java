@@ -1,10 +1,17 @@
 package skytally.project.documents;
 
 import jakarta.servlet.http.HttpServletRequest;
+import java.io.IOException;
+import java.nio.charset.StandardCharsets;
 import java.util.ArrayList;
 import java.util.List;
 import java.util.UUID;
+import org.jspecify.annotations.Nullable;
+import org.springframework.http.ContentDisposition;
+import org.springframework.http.HttpHeaders;
 import org.springframework.http.HttpStatus;
+import org.springframework.http.MediaType;
+import org.springframework.http.ResponseEntity;
 import org.springframework.stereotype.Controller;
 import org.springframework.util.MultiValueMap;
 import org.springframework.web.bind.annotation.GetMapping;
@@ -12,11 +19,14 @@ import org.springframework.web.bind.annotation.PathVariable;
 import org.springframework.web.bind.annotation.PostMapping;
 import org.springframework.web.bind.annotation.RequestMapping;
 import org.springframework.web.bind.annotation.RequestParam;
+import org.springframework.web.multipart.MultipartFile;
 import org.springframework.web.server.ResponseStatusException;
 import org.springframework.web.servlet.ModelAndView;
+import skytally.project.Attachment;
 import skytally.project.Document;
 import skytally.project.KeptProject;
 import skytally.project.Project;
+import skytally.project.WholeProject;
 import skytally.project.entry.ProjectDesk;
 import skytally.project.entry.Typed;
 import skytally.project.entry.WhoCookie;
@@ -38,8 +48,8 @@ class DocumentsController {
         this.words = words;
     }
 
-    /** A document, and how many claims name it. */
-    record Line(Document document, long claims) {}
+    /** A document, how many claims name it, and how large its file is, if it has one. */
+    record Line(Document document, long claims, String size) {}
 
     @GetMapping
     ModelAndView list(@PathVariable UUID id, @RequestParam MultiValueMap<String, String> sent) {
@@ -49,16 +59,21 @@ class DocumentsController {
 
     @PostMapping
     ModelAndView add(
-            @PathVariable UUID id, @RequestParam MultiValueMap<String, String> sent, HttpServletRequest request) {
+            @PathVariable UUID id,
+            @RequestParam MultiValueMap<String, String> sent,
+            @RequestParam(name = "file", required = false) @Nullable MultipartFile file,
+            HttpServletRequest request)
+            throws IOException {
         Typed typed = new Typed(sent);
         KeptProject kept = desk.openForChange(id, typed);
         Project project = kept.project();
-        DocumentForm form = DocumentForm.sent(kept.version(), typed, words);
+        SentFile sentFile = SentFile.of(file);
+        DocumentForm form = sentFile.into(DocumentForm.sent(kept.version(), typed, words), words);
         if (form.isValid()) {
             try {
                 List<Document> more = new ArrayList<>(project.documents());
-                more.add(form.document());
-                Project changed = project.withDocuments(more);
+                more.add(form.document(sentFile.attachment()));
+                WholeProject changed = new WholeProject(project.withDocuments(more), sentFile.bytes());
                 desk.save(kept, changed, WhoCookie.in(request), "saving.document.added", form.text("mark"));
                 return desk.on(kept, "document-added", "documents");
             } catch (IllegalArgumentException refused) {
@@ -66,6 +81,23 @@ class DocumentsController {
             }
         }
         return withList(desk.refusal(LIST, kept), kept, form);
+    }
+
+    /** The file itself: only ever to be saved, never to be shown, whatever is in it. */
+    @GetMapping("/{mark}/file")
+    ResponseEntity<byte[]> file(@PathVariable UUID id, @PathVariable String mark) {
+        Attachment file = document(desk.open(id), mark).file();
+        if (file == null) {
+            throw new ResponseStatusException(HttpStatus.NOT_FOUND);
+        }
+        ContentDisposition saved = ContentDisposition.attachment()
+                .filename(file.name(), StandardCharsets.UTF_8)
+                .build();
+        return ResponseEntity.ok()
+                .contentType(MediaType.parseMediaType(file.mediaType()))
+                .header(HttpHeaders.CONTENT_DISPOSITION, saved.toString())
+                .header("X-Content-Type-Options", "nosniff")
+                .body(desk.bytes(id, file));
     }
 
     @GetMapping("/{mark}")
@@ -82,20 +114,28 @@ class DocumentsController {
             @PathVariable UUID id,
             @PathVariable String mark,
             @RequestParam MultiValueMap<String, String> sent,
-            HttpServletRequest request) {
+            @RequestParam(name = "file", required = false) @Nullable MultipartFile file,
+            HttpServletRequest request)
+            throws IOException {
         Typed typed = new Typed(sent);
         KeptProject kept = desk.openForChange(id, typed);
         Project project = kept.project();
         Document before = document(kept, mark);
-        DocumentForm form = DocumentForm.sent(kept.version(), typed, words);
+        SentFile sentFile = SentFile.of(file);
+        DocumentForm form = sentFile.into(DocumentForm.sent(kept.version(), typed, words), words);
         if (form.isValid()) {
             try {
-                Document after = form.document();
+                Document after = form.document(sentFile.instead(typed.has("withoutFile") ? null : before.file()));
                 Project changed = Citing.renamed(project, mark, after.mark())
                         .withDocuments(project.documents().stream()
                                 .map(document -> document.equals(before) ? after : document)
                                 .toList());
-                desk.save(kept, changed, WhoCookie.in(request), "saving.document.changed", mark);
+                desk.save(
+                        kept,
+                        new WholeProject(changed, sentFile.bytes()),
+                        WhoCookie.in(request),
+                        "saving.document.changed",
+                        mark);
                 return desk.on(kept, "saved", "documents");
             } catch (IllegalArgumentException refused) {
                 form = form.refused("mark", String.valueOf(refused.getMessage()));
@@ -140,13 +180,20 @@ class DocumentsController {
                 .addObject(
                         "lines",
                         project.documents().stream()
-                                .map(document -> new Line(document, Citing.count(project, document.mark())))
+                                .map(document ->
+                                        new Line(document, Citing.count(project, document.mark()), size(document)))
                                 .toList());
+    }
+
+    private static String size(Document document) {
+        Attachment file = document.file();
+        return file == null ? "" : SentFile.size(file.size());
     }
 
     private static ModelAndView withOne(ModelAndView page, KeptProject kept, Document document, DocumentForm form) {
         return page.addObject("form", form)
                 .addObject("document", document)
+                .addObject("size", size(document))
                 .addObject("claims", Citing.count(kept.project(), document.mark()));
     }
 }

@@ -34,17 +34,26 @@ public class AskedFields {
         return number(subject, name, Kind.NUMBER, List.of("°"), BigDecimal.ZERO, new BigDecimal(360));
     }
 
+    /** Degrees of latitude or longitude. */
+    public Field angle(Subject subject, String name, int most) {
+        return number(subject, name, Kind.NUMBER, List.of("°"), new BigDecimal(-most), new BigDecimal(most));
+    }
+
+    public Field text(Subject subject, String name) {
+        return new Field(subject, name, "", label(name), Kind.TEXT, List.of(), null, null, List.of(), Optional.empty());
+    }
+
     public Field count(Subject subject, String name, int most) {
         return number(subject, name, Kind.WHOLE, List.of(), BigDecimal.ONE, new BigDecimal(most));
     }
 
     public Field choice(Subject subject, String name, List<String> choices) {
-        return new Field(subject, name, label(name), Kind.CHOICE, List.of(), null, null, choices, Optional.empty());
+        return new Field(subject, name, "", label(name), Kind.CHOICE, List.of(), null, null, choices, Optional.empty());
     }
 
     private Field number(
             Subject subject, String name, Kind kind, List<String> units, BigDecimal least, BigDecimal most) {
-        return new Field(subject, name, label(name), kind, units, least, most, List.of(), Optional.empty());
+        return new Field(subject, name, "", label(name), kind, units, least, most, List.of(), Optional.empty());
     }
 
     private String label(String name) {

@@ -12,6 +12,9 @@ import jakarta.servlet.http.HttpServletRequest;
  */
 public record Heading(String document, String party, String who, String why) {
 
+    /** Nothing said. */
+    public static final Heading NONE = new Heading("", "", "", "");
+
     /** As sent; who typed last in this browser is remembered. */
     public static Heading of(Typed typed, HttpServletRequest request) {
         return new Heading(

@@ -16,6 +16,7 @@ import skytally.project.Values;
 public record Spot(double eastM, double northM) {
 
     private static final int CENTIMETRES = 2;
+    private static final Position REFERENCE = new Position(0, 0, 0);
 
     /** A file may hold more than a form takes; what lies farther is taken as not placed. */
     private static final double FARTHEST_M = 1_000_000;
@@ -52,14 +53,21 @@ public record Spot(double eastM, double northM) {
         return rounded.signum() == 0 ? "0" : rounded.stripTrailingZeros().toPlainString();
     }
 
+    /** From the reference point. */
+    public double distanceM() {
+        return REFERENCE.groundDistanceTo(new Position(eastM, northM, 0));
+    }
+
+    /** From the reference point, 0 to 360. */
+    public double bearingDeg() {
+        return (StrictMath.toDegrees(REFERENCE.bearingTo(new Position(eastM, northM, 0))) + 360) % 360;
+    }
+
     /** Distance and bearing from the reference point, written out. */
     public String fromReference(Words words) {
-        Position reference = new Position(0, 0, 0);
-        Position here = new Position(eastM, northM, 0);
-        double bearing = (StrictMath.toDegrees(reference.bearingTo(here)) + 360) % 360;
         return words.say(
                 "position.from-reference",
-                QuantityFormat.decimals(reference.groundDistanceTo(here), 1).plain(),
-                QuantityFormat.decimals(bearing, 1).plain());
+                QuantityFormat.decimals(distanceM(), 1).plain(),
+                QuantityFormat.decimals(bearingDeg(), 1).plain());
     }
 }

@@ -1,14 +1,12 @@
 package skytally.project.entry;
 
 import java.math.BigDecimal;
-import java.time.DateTimeException;
-import java.time.LocalTime;
-import java.time.ZoneId;
 import java.util.Optional;
+import org.jspecify.annotations.Nullable;
 import skytally.notation.NumberReader;
 import skytally.project.Bounds;
 import skytally.project.Field;
-import skytally.project.Units;
+import skytally.project.Misfit;
 
 /** Whether what was typed can stand in a field, and if not, what to type instead. */
 final class TypedValue {
@@ -17,14 +15,33 @@ final class TypedValue {
 
     /** Nothing if it can. */
     static Optional<String> fault(Words words, Field field, String value, String unit) {
-        return switch (field.kind()) {
-            case TEXT -> text(words, field, value);
-            case CHOICE ->
-                field.choices().contains(value)
-                        ? Optional.empty()
-                        : Optional.of(words.say("entry.fault.choice", field.label(), shortened(value)));
-            case WHOLE, NUMBER -> number(words, field, value, unit);
+        return Misfit.of(field, value, unit).map(misfit -> said(words, field, value, unit, misfit));
+    }
+
+    private static String said(Words words, Field field, String value, String unit, Misfit misfit) {
+        String shown = shortened(value);
+        return switch (misfit.reason()) {
+            case LONG -> words.say("entry.fault.long", field.label(), String.valueOf(Bounds.TEXT));
+            case UNIT -> words.say("entry.fault.unit", field.label(), String.join(", ", field.units()));
+            case NUMBER -> words.say("entry.fault.number", field.label(), shown, misfit.why());
+            case BOUNDS ->
+                words.say(
+                        "entry.fault.bounds",
+                        field.label(),
+                        bound(words, field.least()),
+                        bound(words, field.most()),
+                        field.firstUnit(),
+                        shown + (unit.isEmpty() ? "" : " " + unit));
+            case WHOLE -> words.say("entry.fault.whole", field.label(), shown);
+            case CHOICE -> words.say("entry.fault.choice", field.label(), shown);
+            case ZONE -> words.say("entry.fault.zone", field.label(), shown);
+            case CLOCK -> words.say("entry.fault.clock", field.label(), shown);
+            case LINES -> words.say("entry.fault.lines", field.label(), misfit.why());
         };
+    }
+
+    private static String bound(Words words, @Nullable BigDecimal bound) {
+        return bound == null ? words.say("entry.range.open") : bound.toPlainString();
     }
 
     /** The number, of what {@link #fault} found nothing wrong with. */
@@ -33,49 +50,6 @@ final class TypedValue {
             return number.value();
         }
         throw new IllegalArgumentException("Not a number: " + value);
-    }
-
-    private static Optional<String> text(Words words, Field field, String value) {
-        if (value.length() > Bounds.TEXT) {
-            return Optional.of(words.say("entry.fault.long", field.label(), String.valueOf(Bounds.TEXT)));
-        }
-        try {
-            if (field.name().equals("timeZone")) {
-                ZoneId.of(value);
-            } else if (field.name().equals("curfew")) {
-                LocalTime.parse(value);
-            }
-            return Optional.empty();
-        } catch (DateTimeException unknown) {
-            return Optional.of(words.say("entry.fault." + field.name(), shortened(value)));
-        }
-    }
-
-    private static Optional<String> number(Words words, Field field, String value, String unit) {
-        if (!field.units().isEmpty() && !field.units().contains(unit)) {
-            return Optional.of(words.say("entry.fault.unit", field.label(), String.join(", ", field.units())));
-        }
-        NumberReader.Reading reading = NumberReader.read(value, field.kind() == Field.Kind.WHOLE);
-        if (reading instanceof NumberReader.Unreadable unreadable) {
-            return Optional.of(words.say("entry.fault.number", field.label(), shortened(value), unreadable.why()));
-        }
-        BigDecimal number = ((NumberReader.Number) reading).value();
-        BigDecimal inFirst = Units.inFirst(number, unit);
-        BigDecimal least = field.least();
-        BigDecimal most = field.most();
-        if ((least != null && inFirst.compareTo(least) < 0) || (most != null && inFirst.compareTo(most) > 0)) {
-            return Optional.of(words.say(
-                    "entry.fault.bounds",
-                    field.label(),
-                    least == null ? words.say("entry.range.open") : least.toPlainString(),
-                    most == null ? words.say("entry.range.open") : most.toPlainString(),
-                    field.firstUnit(),
-                    shortened(value) + (unit.isEmpty() ? "" : " " + unit)));
-        }
-        if (field.kind() == Field.Kind.WHOLE && number.stripTrailingZeros().scale() > 0) {
-            return Optional.of(words.say("entry.fault.whole", field.label(), shortened(value)));
-        }
-        return Optional.empty();
     }
 
     static String shortened(String typed) {

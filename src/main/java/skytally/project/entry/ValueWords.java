@@ -105,7 +105,7 @@ public class ValueWords {
             return "";
         }
         String written = bare(field, value);
-        return unit.isEmpty() || !field.kind().isNumber()
+        return unit.isEmpty() || !field.kind().hasUnit()
                 ? written
                 : written + (unit.equals("°") ? "" : "\u00a0") + unit;
     }

@@ -6,6 +6,7 @@ import java.time.LocalDate;
 import java.util.ArrayList;
 import java.util.Arrays;
 import java.util.List;
+import java.util.Locale;
 import java.util.Optional;
 import java.util.Set;
 import java.util.stream.IntStream;
@@ -21,6 +22,7 @@ import skytally.project.Saving;
 import skytally.project.Source;
 import skytally.project.Stated;
 import skytally.project.Values;
+import skytally.project.hours.Hours;
 import skytally.scene.State;
 import skytally.web.InvalidInputException.Fault;
 
@@ -35,6 +37,7 @@ public class ValuesEditor {
 
     private final Words words;
     private final ValueWords valueWords;
+    private final CrossChecks crossChecks;
     private final Clock clock;
 
     @Autowired
@@ -45,18 +48,14 @@ public class ValuesEditor {
     ValuesEditor(Words words, ValueWords valueWords, Clock clock) {
         this.words = words;
         this.valueWords = valueWords;
+        this.crossChecks = new CrossChecks(words);
         this.clock = clock;
     }
 
     /** The form as it is opened. */
     public ValuesForm form(KeptProject kept, List<Field> fields, Values values, Heading heading) {
         List<ValueRow> rows = fields.stream()
-                .map(field -> row(
-                        kept.project(),
-                        field,
-                        values.get(field.name()),
-                        Asked.standing(field, values.get(field.name())),
-                        null))
+                .map(field -> row(kept.project(), field, values, Asked.standing(field, values.get(field.name())), null))
                 .toList();
         return form(kept, heading, rows, List.of());
     }
@@ -77,7 +76,7 @@ public class ValuesEditor {
             Asked asked = Asked.sent(field, stated, typed);
             Optional<String> fault = fault(project, field, stated, asked, required.contains(field.name()));
             fault.ifPresent(wrong -> faults.add(new Fault(field.name(), wrong)));
-            rows.add(row(project, field, stated, asked, fault.orElse(null)));
+            rows.add(row(project, field, values, asked, fault.orElse(null)));
             if (fault.isEmpty()) {
                 if (isRestated(field, stated, asked)) {
                     Claim claim = claim(field, asked, heading);
@@ -224,8 +223,8 @@ public class ValuesEditor {
         State state = asked.value().isEmpty() ? State.NOT_KNOWN : document.isEmpty() ? State.ASSUMED : State.GIVEN;
         boolean number = field.kind().isNumber() && !asked.value().isEmpty();
         return new Claim(
-                asked.value(),
-                number ? asked.unit() : "",
+                inOneForm(field, asked.value()),
+                field.kind().hasUnit() && !asked.value().isEmpty() ? asked.unit() : "",
                 state,
                 number ? asked.low() : "",
                 number ? asked.high() : "",
@@ -233,6 +232,13 @@ public class ValuesEditor {
                 party,
                 LocalDate.now(clock).toString(),
                 heading.who());
+    }
+
+    /** Rows of hours have one form; all else stands as it was typed. */
+    private static String inOneForm(Field field, String value) {
+        return field.kind() == Field.Kind.SCHEDULE && !value.isEmpty()
+                ? Hours.read(value).written()
+                : value;
     }
 
     private ValuesForm form(KeptProject kept, Heading heading, List<ValueRow> rows, List<Fault> faults) {
@@ -249,7 +255,9 @@ public class ValuesEditor {
                 List.copyOf(faults));
     }
 
-    private ValueRow row(Project project, Field field, Stated stated, Asked asked, @Nullable String fault) {
+    private ValueRow row(Project project, Field field, Values values, Asked asked, @Nullable String fault) {
+        Stated stated = values.get(field.name());
+        Optional<CrossCheck> other = crossChecks.of(project, field, values);
         Claim inUse = stated.inUse();
         boolean known = inUse.state() != State.NOT_KNOWN;
         String from = known
@@ -258,6 +266,7 @@ public class ValuesEditor {
                         + (stated.equals(Stated.NOTHING) ? "" : " " + valueWords.source(project, inUse));
         return new ValueRow(
                 field.name(),
+                group(field),
                 field.label(),
                 input(field),
                 hint(field),
@@ -267,16 +276,26 @@ public class ValuesEditor {
                 inUse.state(),
                 from,
                 claims(project, field, stated, asked),
-                stated.isDisputed(),
+                other.map(CrossCheck::words).orElse(""),
+                stated.isDisputed() || other.map(CrossCheck::differs).orElse(false),
                 fault,
                 fault != null && asked.hasMore(stated));
+    }
+
+    private ValueRow.Group group(Field field) {
+        if (field.group().isEmpty()) {
+            return ValueRow.Group.NONE;
+        }
+        String key = "group." + field.subject().name().toLowerCase(Locale.ROOT) + "." + field.group();
+        return new ValueRow.Group(words.say(key), words.find(key + ".hint").orElse(""));
     }
 
     private static String input(Field field) {
         return switch (field.kind()) {
             case CHOICE -> "choice";
             case WHOLE, NUMBER -> "number";
-            case TEXT -> field.name().equals("note") ? "note" : "text";
+            case TEXT, ZONE, CLOCK -> "text";
+            case NOTE, CORNERS, SCHEDULE -> "note";
         };
     }
 

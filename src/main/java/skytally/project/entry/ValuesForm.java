@@ -1,5 +1,6 @@
 package skytally.project.entry;
 
+import java.util.ArrayList;
 import java.util.List;
 import skytally.web.InvalidInputException.Fault;
 
@@ -19,4 +20,20 @@ public record ValuesForm(
         List<Option> documents,
         List<Option> parties,
         List<ValueRow> rows,
-        List<Fault> faults) {}
+        List<Fault> faults) {
+
+    /** Rows that stand under one heading. */
+    public record Part(ValueRow.Group group, List<ValueRow> rows) {}
+
+    /** The rows under their headings. */
+    public List<Part> parts() {
+        List<Part> parts = new ArrayList<>();
+        for (ValueRow row : rows) {
+            if (parts.isEmpty() || !parts.get(parts.size() - 1).group().equals(row.group())) {
+                parts.add(new Part(row.group(), new ArrayList<>()));
+            }
+            parts.get(parts.size() - 1).rows().add(row);
+        }
+        return parts;
+    }
+}

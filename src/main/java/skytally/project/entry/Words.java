@@ -19,7 +19,7 @@ public class Words {
         return messages.getMessage(key, with, Locale.ENGLISH);
     }
 
-    public Optional<String> find(String key) {
-        return Optional.ofNullable(messages.getMessage(key, null, null, Locale.ENGLISH));
+    public Optional<String> find(String key, Object... with) {
+        return Optional.ofNullable(messages.getMessage(key, with, null, Locale.ENGLISH));
     }
 }

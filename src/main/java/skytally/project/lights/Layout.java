@@ -7,8 +7,10 @@ import java.util.Map;
 import java.util.Set;
 import java.util.TreeMap;
 import org.springframework.stereotype.Component;
+import skytally.project.Bounds;
 import skytally.project.Claim;
 import skytally.project.Field;
+import skytally.project.LuminaireType;
 import skytally.project.Placement;
 import skytally.project.Scheme;
 import skytally.project.Stated;
@@ -39,10 +41,31 @@ class Layout {
     /**
      * The new lights, marked on from those there are.
      *
-     * @param mark of the one light, or empty for the next free one
+     * @param mark of the one light or pole, or empty for the next free one
      * @param said everything the way asks for
+     * @throws IllegalArgumentException if they cannot be made, with what to do
      */
-    List<Placement> lights(Way way, Scheme scheme, String type, String mark, Values said) {
+    List<Placement> lights(Way way, Scheme scheme, LuminaireType type, String mark, Values said) {
+        Heads heads = Heads.read(said.text("heads"), words);
+        long asked = (long) poles(way, said) * heads.aPole();
+        if (scheme.placements().size() + asked > Bounds.LIGHTS) {
+            throw new IllegalArgumentException(
+                    words.say("position.fault.many", asked, scheme.placements().size(), Bounds.LIGHTS));
+        }
+        return poles(way, scheme, type.mark(), mark, said).stream()
+                .flatMap(pole -> heads.on(pole, type, words).stream())
+                .toList();
+    }
+
+    private static int poles(Way way, Values said) {
+        return switch (way) {
+            case GRID, POLAR -> 1;
+            case ROW, RING -> (int) number(said, "howMany");
+            case BLOCK -> (int) Math.min(Bounds.LIGHTS + 1.0, number(said, "rows") * number(said, "columns"));
+        };
+    }
+
+    private List<Placement> poles(Way way, Scheme scheme, String type, String mark, Values said) {
         return switch (way) {
             case GRID -> List.of(new Placement(one(scheme, type, mark), type, kept(said)));
             case POLAR -> {
@@ -54,7 +77,37 @@ class Layout {
             }
             case ROW -> row(way, scheme, type, said);
             case RING -> ring(way, scheme, type, said);
+            case BLOCK -> block(way, scheme, type, said);
         };
+    }
+
+    private List<Placement> block(Way way, Scheme scheme, String type, Values said) {
+        int rows = (int) number(said, "rows");
+        int columns = (int) number(said, "columns");
+        double along = number(said, "rowBearing");
+        Spot corner = spot(said, "startEast", "startNorth");
+        List<String> marks = marks(scheme, type, rows * columns);
+        List<Placement> lights = new ArrayList<>();
+        for (int row = 0; row < rows; row++) {
+            Spot start = corner.at(row * number(said, "rowSpacing"), along + 90);
+            for (int column = 0; column < columns; column++) {
+                String how = words.say(
+                        "position.how.block",
+                        column + 1,
+                        columns,
+                        row + 1,
+                        rows,
+                        amount(way, said, "startEast"),
+                        amount(way, said, "startNorth"),
+                        amount(way, said, "columnSpacing"),
+                        amount(way, said, "rowBearing"),
+                        amount(way, said, "rowSpacing"));
+                Spot spot = start.at(column * number(said, "columnSpacing"), along);
+                lights.add(
+                        new Placement(marks.get(lights.size()), type, put(kept(said), said, "startEast", spot, how)));
+            }
+        }
+        return lights;
     }
 
     private List<Placement> row(Way way, Scheme scheme, String type, Values said) {
@@ -140,10 +193,13 @@ class Layout {
         return mark.isEmpty() ? marks(scheme, type, 1).get(0) : mark;
     }
 
-    /** The next free marks of a type: A1-01, A1-02 and so on. */
+    /** The next free marks of a type: A1-01, A1-02 and so on; a pole whose lights are A1-01a and A1-01b has A1-01. */
     private static List<String> marks(Scheme scheme, String type, int count) {
         Set<String> taken = new HashSet<>();
-        scheme.placements().forEach(light -> taken.add(light.mark()));
+        for (Placement light : scheme.placements()) {
+            taken.add(light.mark());
+            taken.add(light.mark().replaceAll("(?<=\\d)[a-z]$", ""));
+        }
         List<String> marks = new ArrayList<>();
         for (int number = 1; marks.size() < count; number++) {
             String mark = type + (number < 10 ? "-0" : "-") + number;

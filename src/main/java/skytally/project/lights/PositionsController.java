@@ -2,8 +2,10 @@ package skytally.project.lights;
 
 import jakarta.servlet.http.HttpServletRequest;
 import jakarta.servlet.http.HttpServletResponse;
+import java.math.BigDecimal;
 import java.util.ArrayList;
 import java.util.List;
+import java.util.Optional;
 import java.util.Set;
 import java.util.UUID;
 import org.springframework.stereotype.Controller;
@@ -17,14 +19,17 @@ import org.springframework.web.servlet.ModelAndView;
 import skytally.project.Field;
 import skytally.project.KeptProject;
 import skytally.project.LuminaireType;
+import skytally.project.Outline;
 import skytally.project.Placement;
 import skytally.project.Scheme;
 import skytally.project.Values;
+import skytally.project.entry.Amount;
 import skytally.project.entry.AskedFields;
 import skytally.project.entry.Heading;
 import skytally.project.entry.Option;
 import skytally.project.entry.ProjectDesk;
 import skytally.project.entry.Reading;
+import skytally.project.entry.Spot;
 import skytally.project.entry.Typed;
 import skytally.project.entry.ValueWords;
 import skytally.project.entry.ValuesEditor;
@@ -72,7 +77,7 @@ class PositionsController {
         Scheme scheme = Schemes.scheme(kept, schemeMark);
         List<Field> fields = Way.of(typed.text("add")).fields(asked);
         ValuesForm form = editor.form(kept, fields, Values.NONE, Heading.of(typed, request));
-        return with(desk.page(PAGE, kept, typed), scheme, typed, form);
+        return with(desk.page(PAGE, kept, typed), kept, scheme, typed, form);
     }
 
     @PostMapping(params = "doing=add")
@@ -99,7 +104,8 @@ class PositionsController {
         }
         if (reading.isValid()) {
             try {
-                List<Placement> more = layout.lights(way, scheme, type, typed.text("mark"), reading.values());
+                List<Placement> more = layout.lights(
+                        way, scheme, scheme.type(type).orElseThrow(), typed.text("mark"), reading.values());
                 List<Placement> all = new ArrayList<>(scheme.placements());
                 all.addAll(more);
                 desk.save(
@@ -111,15 +117,12 @@ class PositionsController {
                         type,
                         scheme.name());
                 WhoCookie.keep(response, heading.who());
-                return desk.on(kept, "lights-added", heading, "lights", scheme.mark(), "positions");
+                return desk.on(kept, "lights-added", more.size(), heading, "lights", scheme.mark(), "positions");
             } catch (IllegalArgumentException refused) {
-                reading = editor.refused(
-                        reading,
-                        reading.values().text("howMany").isEmpty() ? "mark" : "howMany",
-                        String.valueOf(refused.getMessage()));
+                reading = editor.refused(reading, faulty(way, reading.values()), String.valueOf(refused.getMessage()));
             }
         }
-        return with(desk.refusal(PAGE, kept), scheme, typed, reading.form());
+        return with(desk.refusal(PAGE, kept), kept, scheme, typed, reading.form());
     }
 
     @PostMapping(params = "doing=remove")
@@ -143,17 +146,38 @@ class PositionsController {
                 "saving.lights.removed",
                 removed,
                 scheme.name());
-        return desk.on(kept, removed == 0 ? "lights-none" : "lights-removed", "lights", scheme.mark(), "positions");
+        return desk.on(
+                kept,
+                removed == 0 ? "lights-none" : "lights-removed",
+                removed,
+                Heading.NONE,
+                "lights",
+                scheme.mark(),
+                "positions");
     }
 
-    private ModelAndView with(ModelAndView page, Scheme scheme, Typed typed, ValuesForm form) {
+    /** The box most likely at fault for what could not be made. */
+    private static String faulty(Way way, Values said) {
+        if (!said.text("heads").isEmpty()) {
+            return "heads";
+        }
+        return switch (way) {
+            case GRID, POLAR -> "mark";
+            case ROW, RING -> "howMany";
+            case BLOCK -> "rows";
+        };
+    }
+
+    private ModelAndView with(ModelAndView page, KeptProject kept, Scheme scheme, Typed typed, ValuesForm form) {
         String type = typed.text("type");
         return page.addObject("form", form)
                 .addObject("scheme", scheme)
                 .addObject("plan", Plan.of(scheme, shown(scheme, typed), pageNumber(typed), valueWords, words))
                 .addObject(
                         "counts",
-                        scheme.types().stream().map(one -> count(scheme, one)).toList())
+                        scheme.types().stream()
+                                .map(one -> count(scheme, one, kept.project().site()))
+                                .toList())
                 .addObject(
                         "types",
                         scheme.types().stream()
@@ -181,11 +205,22 @@ class PositionsController {
         return use.isEmpty() ? type.mark() : type.mark() + " " + use;
     }
 
-    private String count(Scheme scheme, LuminaireType type) {
-        String scheduled = type.values().text("count");
+    private String count(Scheme scheme, LuminaireType type, Values site) {
+        Optional<BigDecimal> scheduled = Amount.of(type.values().get("count").inUse());
         int placed = scheme.placementsOf(type.mark()).size();
-        return scheduled.isEmpty()
-                ? words.say("positions.count.open", type.mark(), placed)
-                : words.say("positions.count", type.mark(), placed, scheduled);
+        if (scheduled.isEmpty()) {
+            return words.say("positions.count.open", type.mark(), placed);
+        }
+        int missing = scheduled.get().intValue() - placed;
+        String count =
+                words.say("positions.count", type.mark(), placed, type.values().text("count"));
+        return missing <= 0 ? count : words.say("positions.count.centre", count, missing, centre(site));
+    }
+
+    private String centre(Values site) {
+        return Outline.of(site)
+                .map(Outline::centroid)
+                .map(corner -> words.say("positions.centre", Spot.metres(corner.eastM()), Spot.metres(corner.northM())))
+                .orElseGet(() -> words.say("positions.centre.none"));
     }
 }

@@ -20,7 +20,9 @@ enum Way {
     /** Several at equal distances from a start to an end. */
     ROW("howMany", "startEast", "startNorth", "endEast", "endNorth"),
     /** Several at equal angles around a centre. */
-    RING("howMany", "centreEast", "centreNorth", "radius", "firstBearing");
+    RING("howMany", "centreEast", "centreNorth", "radius", "firstBearing"),
+    /** Rows of columns from a corner: a row runs along a bearing, the next is to its right. */
+    BLOCK("startEast", "startNorth", "rows", "columns", "rowSpacing", "columnSpacing", "rowBearing");
 
     private final Set<String> required;
 
@@ -69,8 +71,23 @@ enum Way {
                         asked.distance(Subject.LIGHT, "radius"),
                         asked.bearing(Subject.LIGHT, "firstBearing"),
                         asked.choice(Subject.LIGHT, "aim", List.of("outward", "inward")));
+            case BLOCK ->
+                List.of(
+                        asked.coordinate(Subject.LIGHT, "startEast"),
+                        asked.coordinate(Subject.LIGHT, "startNorth"),
+                        asked.bearing(Subject.LIGHT, "rowBearing"),
+                        asked.count(Subject.LIGHT, "rows", Bounds.LIGHTS),
+                        asked.count(Subject.LIGHT, "columns", Bounds.LIGHTS),
+                        asked.distance(Subject.LIGHT, "rowSpacing"),
+                        asked.distance(Subject.LIGHT, "columnSpacing"));
         };
-        return Stream.concat(where.stream(), Stream.of(light("bearing"), light("tilt"), light("mountingHeight")))
+        return Stream.concat(
+                        where.stream(),
+                        Stream.of(
+                                light("bearing"),
+                                light("tilt"),
+                                light("mountingHeight"),
+                                asked.text(Subject.LIGHT, "heads")))
                 .toList();
     }
 

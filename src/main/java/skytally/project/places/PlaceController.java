@@ -5,6 +5,7 @@ import jakarta.servlet.http.HttpServletResponse;
 import java.util.List;
 import java.util.Set;
 import java.util.UUID;
+import java.util.stream.Stream;
 import org.jspecify.annotations.Nullable;
 import org.springframework.http.HttpStatus;
 import org.springframework.stereotype.Controller;
@@ -25,7 +26,6 @@ import skytally.project.Values;
 import skytally.project.entry.Heading;
 import skytally.project.entry.ProjectDesk;
 import skytally.project.entry.Reading;
-import skytally.project.entry.Spot;
 import skytally.project.entry.Typed;
 import skytally.project.entry.ValueRow;
 import skytally.project.entry.ValuesEditor;
@@ -77,39 +77,42 @@ class PlaceController {
         Place place = place(kept, mark);
         Heading heading = Heading.of(typed, request);
         Reading reading = editor.read(kept, FIELDS, place.values(), typed, heading, Set.of());
-        boolean moved = spot.fields().stream()
-                .anyMatch(field -> !typed.text(field.name()).isEmpty());
-        Reading move = editor.read(
-                kept,
-                spot.fields(),
-                Values.NONE,
-                typed,
-                heading,
-                moved ? Set.of(PlaceSpot.DISTANCE, PlaceSpot.DIRECTION) : Set.of());
+        PlaceSpot.Way way = wayTyped(typed);
+        Reading move = editor.read(kept, moves(), Values.NONE, typed, heading, spot.required(way));
         for (Fault fault : move.form().faults()) {
             if (reading.form().faults().stream().noneMatch(fault::equals)) {
                 reading = editor.refused(reading, fault.field(), fault.message());
             }
         }
-        Directions directions = Directions.read(typed.text("looks"), typed.text("horizon"), words);
+        Directions directions =
+                Directions.read(typed.text("looks"), typed.text("horizon"), typed.text("ground"), words);
         for (Directions.Unread unread : directions.faults()) {
             reading = editor.refused(reading, unread.text(), unread.message());
         }
-        if (moved && reading.isValid() && isPutByGridToo(place, reading.values())) {
-            reading = editor.refused(reading, PlaceSpot.DISTANCE, words.say("place.fault.both"));
+        Values values = reading.values();
+        if (reading.isValid() && way != PlaceSpot.Way.GRID) {
+            String at = spot.fields(way).get(0).name();
+            if (isPutByGridToo(place, values) || isTypedInTwoWays(typed)) {
+                reading = editor.refused(reading, at, words.say("place.fault.both"));
+            } else {
+                try {
+                    values = spot.put(values, move.values(), way, kept.project().site());
+                } catch (IllegalArgumentException refused) {
+                    reading = editor.refused(reading, at, String.valueOf(refused.getMessage()));
+                }
+            }
         }
         if (!reading.isValid()) {
             return with(
                     desk.refusal(PAGE, kept),
+                    kept,
                     place,
                     reading.form(),
                     move.form().rows(),
                     mark,
-                    typed.text("looks"),
-                    typed.text("horizon"));
+                    new Texts(typed.text("looks"), typed.text("horizon"), typed.text("ground")));
         }
-        Values values = moved ? spot.put(reading.values(), move.values()) : reading.values();
-        Place changed = new Place(mark, values, directions.looks(), directions.horizon());
+        Place changed = new Place(mark, values, directions.looks(), directions.horizon(), directions.ground());
         desk.save(kept, replaced(kept.project(), place, changed), heading.who(), "saving.place", mark);
         WhoCookie.keep(response, heading.who());
         return desk.on(kept, "saved", heading, "places", mark);
@@ -127,7 +130,7 @@ class PlaceController {
         String other = typed.text("mark");
         Project changed;
         try {
-            changed = replaced(kept.project(), place, new Place(other, place.values(), place.looks(), place.horizon()));
+            changed = replaced(kept.project(), place, place.called(other));
         } catch (IllegalArgumentException refused) {
             return untouched(
                     desk.refusal(PAGE, kept),
@@ -167,6 +170,29 @@ class PlaceController {
                 .toList());
     }
 
+    private List<Field> moves() {
+        return Stream.of(PlaceSpot.Way.POLAR, PlaceSpot.Way.GLOBE)
+                .flatMap(way -> spot.fields(way).stream())
+                .toList();
+    }
+
+    /** The way something is typed in; the grid if it is in none of the others. */
+    private PlaceSpot.Way wayTyped(Typed typed) {
+        return Stream.of(PlaceSpot.Way.POLAR, PlaceSpot.Way.GLOBE)
+                .filter(way -> isTyped(way, typed))
+                .findFirst()
+                .orElse(PlaceSpot.Way.GRID);
+    }
+
+    private boolean isTypedInTwoWays(Typed typed) {
+        return isTyped(PlaceSpot.Way.POLAR, typed) && isTyped(PlaceSpot.Way.GLOBE, typed);
+    }
+
+    private boolean isTyped(PlaceSpot.Way way, Typed typed) {
+        return spot.fields(way).stream()
+                .anyMatch(field -> !typed.text(field.name()).isEmpty());
+    }
+
     private static boolean isPutByGridToo(Place place, Values values) {
         return !values.get("east").equals(place.values().get("east"))
                 || !values.get("north").equals(place.values().get("north"));
@@ -184,31 +210,38 @@ class PlaceController {
                 ? form
                 : editor.refused(new Reading(place.values(), form), "mark", markFault)
                         .form();
-        List<ValueRow> move =
-                editor.form(kept, spot.fields(), Values.NONE, heading).rows();
+        List<ValueRow> move = editor.form(kept, moves(), Values.NONE, heading).rows();
         return with(
-                page, place, told, move, mark, Directions.looks(place.looks()), Directions.horizon(place.horizon()));
+                page,
+                kept,
+                place,
+                told,
+                move,
+                mark,
+                new Texts(
+                        Directions.looks(place.looks()),
+                        Directions.horizon(place.horizon()),
+                        Directions.ground(place.ground())));
     }
+
+    /** What stands in the boxes of several lines. */
+    public record Texts(String looks, String horizon, String ground) {}
 
     private ModelAndView with(
             ModelAndView page,
+            KeptProject kept,
             Place place,
             ValuesForm form,
             List<ValueRow> move,
             String mark,
-            String looks,
-            String horizon) {
+            Texts texts) {
         return page.addObject("form", form)
                 .addObject("place", place)
                 .addObject("move", move)
                 .addObject("mark", mark)
-                .addObject("looks", looks)
-                .addObject("horizon", horizon)
+                .addObject("texts", texts)
                 .addObject("said", place.values().byField().size())
                 .addObject(
-                        "polar",
-                        Spot.of(place.values())
-                                .map(where -> where.fromReference(words))
-                                .orElseGet(() -> words.say("position.none")));
+                        "where", spot.whereabouts(place.values(), kept.project().site()));
     }
 }

@@ -3,10 +3,8 @@ package skytally.project.places;
 import jakarta.servlet.http.HttpServletRequest;
 import jakarta.servlet.http.HttpServletResponse;
 import java.util.ArrayList;
+import java.util.Arrays;
 import java.util.List;
-import java.util.Map;
-import java.util.Set;
-import java.util.TreeMap;
 import java.util.UUID;
 import java.util.stream.Stream;
 import org.springframework.stereotype.Controller;
@@ -20,15 +18,14 @@ import org.springframework.web.servlet.ModelAndView;
 import skytally.project.Field;
 import skytally.project.Field.Subject;
 import skytally.project.Fields;
+import skytally.project.Globe;
 import skytally.project.KeptProject;
 import skytally.project.Place;
-import skytally.project.Stated;
 import skytally.project.Values;
 import skytally.project.entry.Cell;
 import skytally.project.entry.Heading;
 import skytally.project.entry.ProjectDesk;
 import skytally.project.entry.Reading;
-import skytally.project.entry.Spot;
 import skytally.project.entry.Typed;
 import skytally.project.entry.ValueWords;
 import skytally.project.entry.ValuesEditor;
@@ -42,10 +39,7 @@ import skytally.project.entry.Words;
 class PlacesController {
 
     private static final String PAGE = "project/places/page";
-    private static final String POLAR = "polar";
-    private static final List<String> WAYS = List.of("grid", POLAR);
-    private static final List<Field> COLUMNS =
-            fields("what", "kind", "east", "north", "groundHeight", "eyeHeight", "facing");
+    private static final List<Field> COLUMNS = fields("what", "kind", "groundHeight", "eyeHeight", "facing");
 
     private final ProjectDesk desk;
     private final ValuesEditor editor;
@@ -66,10 +60,10 @@ class PlacesController {
      *
      * @param mark  of it
      * @param cells its values
-     * @param polar distance and bearing from the reference point, or that it has no position
+     * @param where it is, in each way
      * @param looks how many directions are looked at from it
      */
-    record Line(String mark, List<Cell> cells, String polar, int looks) {}
+    record Line(String mark, List<Cell> cells, PlaceSpot.Whereabouts where, int looks) {}
 
     @GetMapping
     ModelAndView page(
@@ -89,13 +83,20 @@ class PlacesController {
         Typed typed = new Typed(sent);
         KeptProject kept = desk.openForChange(id, typed);
         Heading heading = Heading.of(typed, request);
-        boolean polar = isPolar(typed);
-        Set<String> required = polar ? Set.of(PlaceSpot.DISTANCE, PlaceSpot.DIRECTION) : Set.of();
-        Reading reading = editor.read(kept, asked(typed), Values.NONE, typed, heading, required);
+        PlaceSpot.Way way = way(typed);
+        Reading reading = editor.read(kept, asked(typed), Values.NONE, typed, heading, spot.required(way));
+        Values values = reading.values();
+        if (reading.isValid()) {
+            try {
+                values = spot.put(
+                        PlaceSpot.kept(values), values, way, kept.project().site());
+            } catch (IllegalArgumentException refused) {
+                reading = editor.refused(reading, spot.fields(way).get(0).name(), String.valueOf(refused.getMessage()));
+            }
+        }
         String mark = typed.text("mark");
         if (reading.isValid()) {
             try {
-                Values values = polar ? spot.put(kept(reading.values()), reading.values()) : reading.values();
                 List<Place> more = new ArrayList<>(kept.project().places());
                 more.add(new Place(mark, values, List.of(), List.of()));
                 desk.save(kept, kept.project().withPlaces(more), heading.who(), "saving.place.added", mark);
@@ -115,35 +116,38 @@ class PlacesController {
     }
 
     private List<Field> asked(Typed typed) {
-        List<Field> where = isPolar(typed) ? spot.fields() : fields("east", "north");
+        PlaceSpot.Way way = way(typed);
+        List<Field> where = way == PlaceSpot.Way.GRID ? fields("east", "north") : spot.fields(way);
         return Stream.of(fields("what", "kind"), where, fields("groundHeight", "eyeHeight", "facing"))
                 .flatMap(List::stream)
                 .toList();
     }
 
-    private static boolean isPolar(Typed typed) {
-        return typed.text("add").equals(POLAR);
-    }
-
-    /** Without what the position is worked out from. */
-    private static Values kept(Values read) {
-        Map<String, Stated> kept = new TreeMap<>(read.byField());
-        kept.remove(PlaceSpot.DISTANCE);
-        kept.remove(PlaceSpot.DIRECTION);
-        return new Values(kept);
+    private static PlaceSpot.Way way(Typed typed) {
+        return Arrays.stream(PlaceSpot.Way.values())
+                .filter(way -> way.word().equals(typed.text("add")))
+                .findFirst()
+                .orElse(PlaceSpot.Way.GRID);
     }
 
     private ModelAndView with(ModelAndView page, KeptProject kept, Typed typed, ValuesForm form) {
         return page.addObject("form", form)
                 .addObject(
                         "lines",
-                        kept.project().places().stream().map(this::line).toList())
+                        kept.project().places().stream()
+                                .map(place -> line(place, kept.project().site()))
+                                .toList())
                 .addObject("mark", typed.text("mark"))
-                .addObject("ways", WAYS)
-                .addObject("wayChosen", isPolar(typed) ? POLAR : WAYS.get(0));
+                .addObject(
+                        "ways",
+                        Arrays.stream(PlaceSpot.Way.values())
+                                .map(PlaceSpot.Way::word)
+                                .toList())
+                .addObject("wayChosen", way(typed).word())
+                .addObject("onGlobe", Globe.of(kept.project().site()).isPresent());
     }
 
-    private Line line(Place place) {
+    private Line line(Place place, Values site) {
         return new Line(
                 place.mark(),
                 COLUMNS.stream()
@@ -152,9 +156,7 @@ class PlacesController {
                                 field,
                                 place.values().get(field.name())))
                         .toList(),
-                Spot.of(place.values())
-                        .map(where -> where.fromReference(words))
-                        .orElseGet(() -> words.say("position.none")),
+                spot.whereabouts(place.values(), site),
                 place.looks().size());
     }
 }

@@ -36,6 +36,8 @@ public record ChangeLine(
             Map.entry("from", "From whom"),
             Map.entry("type", "Type"),
             Map.entry("mark", "Mark"),
+            Map.entry("file", "File"),
+            Map.entry("ground", "Ground toward the site"),
             Map.entry("looks", "Directions looked at"),
             Map.entry("horizon", "Skyline"),
             Map.entry("#order", "Order"));

@@ -26,6 +26,7 @@ import skytally.project.Projects;
 import skytally.project.Saving;
 import skytally.project.entry.WhoCookie;
 import skytally.project.entry.Words;
+import skytally.project.WholeProject;
 import skytally.project.transfer.ProjectFile;
 import skytally.web.InvalidInputException.Fault;
 
@@ -86,7 +87,7 @@ class FrontController {
         return ResponseEntity.ok()
                 .contentType(MediaType.APPLICATION_JSON)
                 .header(HttpHeaders.CONTENT_DISPOSITION, saved.toString())
-                .body(ProjectFile.write(project));
+                .body(ProjectFile.write(projects.whole(project)));
     }
 
     @PostMapping("/title")
@@ -111,7 +112,9 @@ class FrontController {
     ModelAndView copy(@PathVariable String id, HttpServletRequest request) {
         Project project = projects.require(id).project();
         Project copy = Copies.titled(Copies.withFreshId(project), Copies.copyTitle(project.title()));
-        projects.add(copy, Saving.by(WhoCookie.in(request), say("shelf.why.copied")));
+        projects.add(
+                new WholeProject(copy, projects.whole(project).attachments()),
+                Saving.by(WhoCookie.in(request), say("shelf.why.copied")));
         return to(copy.id(), "copied");
     }
 

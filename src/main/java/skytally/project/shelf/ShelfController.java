@@ -27,6 +27,7 @@ import skytally.project.ProjectClashException;
 import skytally.project.Projects;
 import skytally.project.Saving;
 import skytally.project.entry.WhoCookie;
+import skytally.project.WholeProject;
 import skytally.project.transfer.ProjectFile;
 import skytally.project.transfer.ProjectFileException;
 import skytally.web.InvalidInputException.Fault;
@@ -113,24 +114,25 @@ class ShelfController {
                 || (file.isEmpty() && String.valueOf(file.getOriginalFilename()).isEmpty())) {
             return page(List.of(new Fault("file", say("shelf.fault.file.none"))), "", request);
         }
-        Project opened;
+        WholeProject whole;
         try {
-            opened = ProjectFile.read(file.getBytes());
+            whole = ProjectFile.open(file.getBytes());
         } catch (ProjectFileException refused) {
             return page(List.of(fault(refused)), "", request);
         }
+        Project opened = whole.project();
         if (!titleFaults(opened.title()).isEmpty()) {
             return page(List.of(new Fault("file", say("shelf.fault.file.title"))), "", request);
         }
         Optional<KeptProject> kept = projects.find(opened.id());
         if (kept.isEmpty()) {
-            projects.add(opened, Saving.by(WhoCookie.in(request), say("shelf.why.file")));
+            projects.add(whole, Saving.by(WhoCookie.in(request), say("shelf.why.file")));
             return to(opened.id(), "opened");
         }
         if (kept.get().project().equals(opened)) {
             return to(opened.id(), "same");
         }
-        return new ModelAndView("redirect:/projects/waiting/" + waiting.hold(opened));
+        return new ModelAndView("redirect:/projects/waiting/" + waiting.hold(whole));
     }
 
     private Fault fault(ProjectFileException refused) {
@@ -140,7 +142,7 @@ class ShelfController {
 
     @GetMapping("/projects/waiting/{token}")
     ModelAndView ask(@PathVariable String token) {
-        Optional<Project> opened = waiting.find(token);
+        Optional<Project> opened = waiting.find(token).map(WholeProject::project);
         if (opened.isEmpty()) {
             return gone();
         }
@@ -159,23 +161,25 @@ class ShelfController {
 
     @PostMapping("/projects/waiting/{token}/replace")
     ModelAndView replace(@PathVariable String token, @RequestParam long version, HttpServletRequest request) {
-        Optional<Project> opened = waiting.find(token);
+        Optional<WholeProject> opened = waiting.find(token);
         if (opened.isEmpty()) {
             return gone();
         }
         projects.save(opened.get(), version, Saving.by(WhoCookie.in(request), say("shelf.why.replaced")));
         waiting.letGo(token);
-        return to(opened.get().id(), "replaced");
+        return to(opened.get().project().id(), "replaced");
     }
 
     @PostMapping("/projects/waiting/{token}/keep-both")
     ModelAndView keepBoth(@PathVariable String token, HttpServletRequest request) {
-        Optional<Project> opened = waiting.find(token);
+        Optional<WholeProject> opened = waiting.find(token);
         if (opened.isEmpty()) {
             return gone();
         }
-        Project copy = Copies.withFreshId(opened.get());
-        projects.add(copy, Saving.by(WhoCookie.in(request), say("shelf.why.file")));
+        Project copy = Copies.withFreshId(opened.get().project());
+        projects.add(
+                new WholeProject(copy, opened.get().attachments()),
+                Saving.by(WhoCookie.in(request), say("shelf.why.file")));
         waiting.letGo(token);
         return to(copy.id(), "opened");
     }

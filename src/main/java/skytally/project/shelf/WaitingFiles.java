@@ -6,7 +6,7 @@ import java.time.Duration;
 import java.util.Optional;
 import java.util.UUID;
 import org.springframework.stereotype.Component;
-import skytally.project.Project;
+import skytally.project.WholeProject;
 import skytally.project.transfer.ProjectFile;
 import skytally.project.transfer.ProjectFileException;
 
@@ -27,19 +27,19 @@ class WaitingFiles {
             .build();
 
     /** Holds a project back, and gives the name to ask for it by. */
-    String hold(Project project) {
+    String hold(WholeProject project) {
         String token = UUID.randomUUID().toString();
         waiting.put(token, ProjectFile.write(project));
         return token;
     }
 
-    Optional<Project> find(String token) {
+    Optional<WholeProject> find(String token) {
         byte[] file = waiting.getIfPresent(token);
         if (file == null) {
             return Optional.empty();
         }
         try {
-            return Optional.of(ProjectFile.read(file));
+            return Optional.of(ProjectFile.open(file));
         } catch (ProjectFileException broken) {
             throw new IllegalStateException("A project does not open from its own file", broken);
         }

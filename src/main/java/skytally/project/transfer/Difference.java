@@ -101,9 +101,9 @@ public final class Difference {
         }
     }
 
-    /** Objects are opened, but for a stated value, which changes as a whole. */
+    /** Objects are opened, but for a stated value and the file of a document, which change as a whole. */
     private static boolean isOpened(JsonNode node) {
-        return node.isObject() && !node.has("claims");
+        return node.isObject() && !node.has("claims") && !node.has("sha256");
     }
 
     private static boolean isListOfMarked(JsonNode node) {

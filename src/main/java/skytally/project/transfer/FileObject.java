@@ -5,6 +5,7 @@ import java.util.HashSet;
 import java.util.LinkedHashMap;
 import java.util.List;
 import java.util.Map;
+import java.util.Optional;
 import java.util.Set;
 import skytally.project.Bounds;
 import tools.jackson.databind.JsonNode;
@@ -42,6 +43,15 @@ final class FileObject {
         return text(found, path + "/" + member);
     }
 
+    /** A text that must be there and may be longer than what a person types. */
+    String longText(String member, int longest) throws ProjectFileException {
+        JsonNode found = member(member);
+        if (found.isMissingNode()) {
+            throw new ProjectFileException(path + "/" + member, "is missing.");
+        }
+        return text(found, path + "/" + member, longest);
+    }
+
     /** A text that may be left out, and is empty then. */
     String textOrEmpty(String member) throws ProjectFileException {
         JsonNode found = member(member);
@@ -49,12 +59,16 @@ final class FileObject {
     }
 
     private static String text(JsonNode found, String path) throws ProjectFileException {
+        return text(found, path, Bounds.TEXT);
+    }
+
+    private static String text(JsonNode found, String path, int longest) throws ProjectFileException {
         if (!found.isString()) {
             throw new ProjectFileException(path, "must be a text in quotation marks, not " + kind(found) + ".");
         }
         String text = found.stringValue();
-        if (text.length() > Bounds.TEXT) {
-            throw new ProjectFileException(path, "is longer than " + Bounds.TEXT + " characters.");
+        if (text.length() > longest) {
+            throw new ProjectFileException(path, "is longer than " + longest + " characters.");
         }
         return text;
     }
@@ -88,9 +102,16 @@ final class FileObject {
     }
 
     /** One object that may be left out. */
-    <T> T object(String member, Maker<T> maker, T otherwise) throws ProjectFileException {
+    <T> Optional<T> object(String member, Maker<T> maker) throws ProjectFileException {
         JsonNode found = member(member);
-        return found.isMissingNode() ? otherwise : made(new FileObject(found, path + "/" + member), maker);
+        return found.isMissingNode()
+                ? Optional.empty()
+                : Optional.of(made(new FileObject(found, path + "/" + member), maker));
+    }
+
+    /** The same with what it is when left out. */
+    <T> T object(String member, Maker<T> maker, T otherwise) throws ProjectFileException {
+        return object(member, maker).orElse(otherwise);
     }
 
     /** Every member of this object as a thing, by its name. */

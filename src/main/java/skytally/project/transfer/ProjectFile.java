@@ -4,10 +4,14 @@ import java.nio.ByteBuffer;
 import java.nio.charset.CharacterCodingException;
 import java.nio.charset.StandardCharsets;
 import java.util.Arrays;
+import java.util.Base64;
 import java.util.List;
 import java.util.Map;
 import java.util.UUID;
 import java.util.stream.Collectors;
+import java.util.stream.Stream;
+import skytally.project.Attachment;
+import skytally.project.Attachments;
 import skytally.project.Claim;
 import skytally.project.Document;
 import skytally.project.LuminaireType;
@@ -19,6 +23,7 @@ import skytally.project.Scheme;
 import skytally.project.Source;
 import skytally.project.Stated;
 import skytally.project.Values;
+import skytally.project.WholeProject;
 import skytally.scene.State;
 import tools.jackson.core.JacksonException;
 import tools.jackson.core.StreamReadConstraints;
@@ -46,6 +51,8 @@ public final class ProjectFile {
     public static final int LARGEST_BYTES = 25 * 1024 * 1024;
 
     private static final int DEEPEST = 32;
+    private static final String ATTACHMENTS = "attachments";
+    private static final int BYTES_AROUND_A_FILE = 200;
 
     private static final JsonMapper JSON = JsonMapper.builder(JsonFactory.builder()
                     .enable(StreamReadFeature.STRICT_DUPLICATE_DETECTION)
@@ -60,9 +67,41 @@ public final class ProjectFile {
 
     private ProjectFile() {}
 
-    /** The canonical text of a project, UTF-8, two spaces a level, ending with a line end. */
+    /** The canonical text of a project without the bytes of its files: UTF-8, two spaces a level, ending with a line end. */
     public static byte[] write(Project project) {
         return text(written(project));
+    }
+
+    /** The canonical text of a project with the bytes of its files. */
+    public static byte[] write(WholeProject whole) {
+        ObjectNode file = written(whole.project());
+        List<String> hashes = Attachments.namedBy(whole.project()).toList();
+        if (!hashes.isEmpty()) {
+            ArrayNode attachments = file.putArray(ATTACHMENTS);
+            for (String hash : hashes) {
+                ObjectNode one = attachments.addObject();
+                one.put("sha256", hash);
+                one.put(
+                        "base64",
+                        Base64.getEncoder()
+                                .encodeToString(whole.attachments().bytes(hash).orElseThrow()));
+            }
+        }
+        return text(file);
+    }
+
+    /**
+     * How many bytes a whole project has at most, without writing it.
+     *
+     * @param text of the project without its files
+     */
+    public static long size(Project project, byte[] text) {
+        return text.length
+                + project.documents().stream()
+                        .map(Document::file)
+                        .flatMap(Stream::ofNullable)
+                        .mapToLong(file -> BYTES_AROUND_A_FILE + (file.size() + 2) / 3 * 4)
+                        .sum();
     }
 
     /** The text of a tree as files have it. */
@@ -93,24 +132,38 @@ public final class ProjectFile {
     }
 
     /**
-     * Reads a project file.
+     * Opens a project file with the bytes of its files. Its values must fit the catalogue of fields.
+     *
+     * @throws ProjectFileException if it is not one, with the path and the reason
+     */
+    public static WholeProject open(byte[] bytes) throws ProjectFileException {
+        WholeProject whole = FileObject.made(new FileObject(tree(bytes), ""), ProjectFile::whole);
+        Catalogued.require(whole.project());
+        return whole;
+    }
+
+    /**
+     * Reads the text of a project without the bytes of its files, as it is kept here.
      *
      * @throws ProjectFileException if it is not one, with the path and the reason
      */
     public static Project read(byte[] bytes) throws ProjectFileException {
+        return FileObject.made(new FileObject(tree(bytes), ""), ProjectFile::project);
+    }
+
+    private static JsonNode tree(byte[] bytes) throws ProjectFileException {
         if (bytes.length == 0) {
             throw new ProjectFileException("", "The file is empty.");
         }
         if (bytes.length > LARGEST_BYTES) {
             throw new ProjectFileException("", "The file is larger than 25 MB, the most a project file may be.");
         }
-        JsonNode tree;
         try {
             String text = StandardCharsets.UTF_8
                     .newDecoder()
                     .decode(ByteBuffer.wrap(bytes))
                     .toString();
-            tree = JSON.readTree(text.startsWith("\uFEFF") ? text.substring(1) : text);
+            return JSON.readTree(text.startsWith("\uFEFF") ? text.substring(1) : text);
         } catch (CharacterCodingException notText) {
             throw new ProjectFileException("", "The file is not text in UTF-8, so it is no project file.");
         } catch (StreamConstraintsException tooMuch) {
@@ -119,7 +172,75 @@ public final class ProjectFile {
         } catch (JacksonException broken) {
             throw new ProjectFileException("", broken(broken));
         }
-        return FileObject.made(new FileObject(tree, ""), ProjectFile::project);
+    }
+
+    private static WholeProject whole(FileObject file) throws ProjectFileException {
+        Project project = project(file);
+        Attachments attachments = Attachments.NONE;
+        for (FileBytes one : file.list(ATTACHMENTS, FileBytes::read)) {
+            Attachments more = attachments.with(one.bytes());
+            if (more.hashes().count() == attachments.hashes().count()) {
+                throw new ProjectFileException("/" + ATTACHMENTS, "holds the same file twice. Leave one of them.");
+            }
+            attachments = more;
+        }
+        requireAll(project, attachments);
+        List<String> named = Attachments.namedBy(project).toList();
+        for (String hash : attachments.hashes().toList()) {
+            if (!named.contains(hash)) {
+                throw new ProjectFileException(
+                        "/" + ATTACHMENTS, "holds a file that no document names: " + hash + ". Remove it.");
+            }
+        }
+        return new WholeProject(project, attachments);
+    }
+
+    /** Every file a document names must be there, and be what the document says of it. */
+    private static void requireAll(Project project, Attachments attachments) throws ProjectFileException {
+        for (int i = 0; i < project.documents().size(); i++) {
+            Attachment file = project.documents().get(i).file();
+            if (file == null) {
+                continue;
+            }
+            String path = "/documents/" + i + "/file";
+            byte[] bytes = attachments
+                    .bytes(file.sha256())
+                    .orElseThrow(() -> new ProjectFileException(
+                            path + "/sha256", "names a file that is not among the attachments."));
+            try {
+                Attachment found = Attachment.of(file.name(), bytes);
+                if (!found.equals(file)) {
+                    throw new ProjectFileException(
+                            path,
+                            "says " + file.size() + " bytes of " + file.mediaType() + ", but the attachment has "
+                                    + found.size() + " bytes of " + found.mediaType() + ".");
+                }
+            } catch (IllegalArgumentException refused) {
+                throw new ProjectFileException(path, refused.getMessage() + ".");
+            }
+        }
+    }
+
+    /** The bytes of one file, borne out by their hash. */
+    private record FileBytes(byte[] bytes) {
+
+        static FileBytes read(FileObject object) throws ProjectFileException {
+            String hash = object.text("sha256");
+            byte[] bytes;
+            try {
+                bytes = Base64.getDecoder().decode(object.longText("base64", LARGEST_BYTES));
+            } catch (IllegalArgumentException broken) {
+                throw new ProjectFileException(
+                        object.path() + "/base64", "is not base64: " + broken.getMessage() + ".");
+            }
+            if (!Attachments.NONE.with(bytes).has(hash)) {
+                throw new ProjectFileException(
+                        object.path() + "/sha256",
+                        "does not fit the bytes beside it: the file was changed or cut. Take it again from where it"
+                                + " was saved.");
+            }
+            return new FileBytes(bytes);
+        }
     }
 
     private static String broken(JacksonException broken) {
@@ -171,7 +292,13 @@ public final class ProjectFile {
                 object.text("title"),
                 object.textOrEmpty("date"),
                 object.textOrEmpty("revision"),
-                object.textOrEmpty("from"));
+                object.textOrEmpty("from"),
+                object.object("file", ProjectFile::attachment).orElse(null));
+    }
+
+    private static Attachment attachment(FileObject object) throws ProjectFileException {
+        return new Attachment(
+                object.text("name"), object.text("mediaType"), object.wholeOr("size", 0), object.text("sha256"));
     }
 
     private static Scheme scheme(FileObject object) throws ProjectFileException {
@@ -198,7 +325,10 @@ public final class ProjectFile {
                                 look.text("name"), number(look, "bearingDeg"), number(look, "altitudeDeg"))),
                 object.list(
                         "horizon",
-                        point -> new Place.HorizonPoint(number(point, "bearingDeg"), number(point, "altitudeDeg"))));
+                        point -> new Place.HorizonPoint(number(point, "bearingDeg"), number(point, "altitudeDeg"))),
+                object.list(
+                        "ground",
+                        point -> new Place.GroundPoint(number(point, "distanceM"), number(point, "heightM"))));
     }
 
     private static double number(FileObject object, String member) throws ProjectFileException {
@@ -270,6 +400,14 @@ public final class ProjectFile {
             putUnlessEmpty(node, "date", document.date());
             putUnlessEmpty(node, "revision", document.revision());
             putUnlessEmpty(node, "from", document.from());
+            Attachment attached = document.file();
+            if (attached != null) {
+                ObjectNode one = node.putObject("file");
+                one.put("name", attached.name());
+                one.put("mediaType", attached.mediaType());
+                one.put("size", attached.size());
+                one.put("sha256", attached.sha256());
+            }
         }
         put(file, "site", project.site());
         ArrayNode schemes = file.putArray("schemes");
@@ -316,6 +454,14 @@ public final class ProjectFile {
                 ObjectNode one = horizon.addObject();
                 one.put("bearingDeg", Double.toString(point.bearingDeg()));
                 one.put("altitudeDeg", Double.toString(point.altitudeDeg()));
+            }
+        }
+        if (!place.ground().isEmpty()) {
+            ArrayNode ground = node.putArray("ground");
+            for (Place.GroundPoint point : place.ground()) {
+                ObjectNode one = ground.addObject();
+                one.put("distanceM", Double.toString(point.distanceM()));
+                one.put("heightM", Double.toString(point.heightM()));
             }
         }
     }

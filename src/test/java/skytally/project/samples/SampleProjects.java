@@ -159,7 +159,7 @@ public final class SampleProjects {
                 "garden", "garden",
                 "road user", "road-user",
                 "public path", "public-path",
-                "public place", "public-path",
+                "public place", "public-place",
                 "viewing place", "viewing-place",
                 "public viewpoint", "viewing-place",
                 "observatory", "observatory",
@@ -187,6 +187,9 @@ public final class SampleProjects {
 
         private static final Map<String, String> UNITS =
                 Map.of("deg", "°", "mag/arcsec2", "mag/arcsec²", "clock", "", "ft east,north", "ft");
+
+        /** Its note says where the dome looks, and not how high: 30° is the low sky of the other directions. */
+        private static final Place.NamedLook SOUTH_WEST = new Place.NamedLook("south-west, as the dome looks", 225, 30);
 
         private final String letter;
         private final Papers papers;
@@ -344,7 +347,16 @@ public final class SampleProjects {
             if (roadClass != null) {
                 values.put("roadClass", roadClass);
             }
-            return new Place(mark, new Values(values), List.of(), mark.equals("VA8") ? horizon() : List.of());
+            return mark.equals("VA8")
+                    ? new Place(mark, new Values(values), List.of(SOUTH_WEST), horizon(), ground())
+                    : new Place(mark, new Values(values), List.of(), List.of());
+        }
+
+        private static List<Place.GroundPoint> ground() {
+            return Table.read("A_ground").stream()
+                    .map(row -> new Place.GroundPoint(
+                            Double.parseDouble(row.get("distance")), Double.parseDouble(row.get("height"))))
+                    .toList();
         }
 
         private static List<Place.HorizonPoint> horizon() {
