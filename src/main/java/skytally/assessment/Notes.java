@@ -15,9 +15,11 @@ final class Notes {
     private static final double RODS_FROM_MAG = 4;
 
     private final List<Note> notes = new ArrayList<>();
+    private String place = "";
 
     Notes(List<PlaceNumbers> places) {
         places.forEach(this::of);
+        place = "";
         add(
                 Topic.FIRST_SCATTERING,
                 "Sky glow counts light scattered once only. More scattering adds to it, by about 15 % overhead at 1 km"
@@ -30,6 +32,7 @@ final class Notes {
     }
 
     private void of(PlaceNumbers numbers) {
+        place = numbers.observer().mark();
         double distance = numbers.get(Measure.DISTANCE);
         if (!numbers.path().clearsTheHorizon()) {
             add(
@@ -112,6 +115,6 @@ final class Notes {
     }
 
     private void add(Topic topic, String sentence) {
-        notes.add(new Note(topic, sentence));
+        notes.add(new Note(topic, place, sentence));
     }
 }

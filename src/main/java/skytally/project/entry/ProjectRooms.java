@@ -13,7 +13,9 @@ class ProjectRooms {
             new Room("documents", "documents"),
             new Room("site", "site"),
             new Room("lights", "lights"),
-            new Room("places", "places"));
+            new Room("places", "places"),
+            new Room("seen", "seen"),
+            new Room("sky", "sky"));
 
     /**
      * A page of a project.
