@@ -28,8 +28,10 @@ public record Asked(Scheme scheme, Hour hour, Clearness air, boolean asEntered, 
     /** The switch between early and late, as in an address. */
     public static final String HOUR = "hour";
 
+    /** The switch of the scheme, as in an address. */
+    public static final String SCHEME = "scheme";
+
     private static final String AIR = "air";
-    private static final String SCHEME = "scheme";
 
     /** Read from an address; the proposed scheme, early, in the project's own air unless it says otherwise. */
     public static Asked of(SwitchBoard board, Project project) {
@@ -51,6 +53,15 @@ public record Asked(Scheme scheme, Hour hour, Clearness air, boolean asEntered, 
                 air.choice().equals(own),
                 board.always().units(),
                 board.rows(hour.row(), scheme.row(), air.row()));
+    }
+
+    /** Mark of the scheme that is there now; of the one asked for where there is none. */
+    public String existing(Project project) {
+        return project.schemes().stream()
+                .filter(each -> each.kind() == Scheme.Kind.EXISTING)
+                .findFirst()
+                .orElse(scheme)
+                .mark();
     }
 
     /** The same in another air. */

@@ -55,6 +55,9 @@ public final class LookNames {
         if (look.purpose() == Look.Purpose.GLARE) {
             return "looking 10° beside the site";
         }
+        if (look.purpose() != Look.Purpose.SKY) {
+            return "in the direction of travel";
+        }
         String name = of(look);
         return look.id().equals(Look.ZENITH) ? name.toLowerCase(Locale.ROOT) : name;
     }

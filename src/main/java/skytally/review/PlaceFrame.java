@@ -1,5 +1,6 @@
 package skytally.review;
 
+import java.math.BigDecimal;
 import java.util.ArrayList;
 import java.util.List;
 import java.util.Locale;
@@ -10,6 +11,7 @@ import skytally.figures.NumberRow;
 import skytally.notation.QuantityFormat;
 import skytally.project.Place;
 import skytally.project.Scheme;
+import skytally.project.entry.Amount;
 import skytally.project.entry.Words;
 import skytally.scene.Lamp;
 import skytally.scene.Observer;
@@ -58,8 +60,14 @@ public record PlaceFrame(
 
     /** What a place is, in words. */
     public static String name(Place place) {
-        String what = place.values().text("what").strip();
-        return what.length() <= LONGEST_NAME ? what : what.substring(0, LONGEST_NAME - 1) + "…";
+        return shortened(place.values().text("what").strip(), LONGEST_NAME);
+    }
+
+    /** People may write as much as they like; a heading holds so much of it. */
+    public static String shortened(String words, int letters) {
+        return words.length() <= letters
+                ? words
+                : words.substring(0, letters - 1).strip() + "…";
     }
 
     private static String lead(Review review, Place place, Optional<Observer> observer, Words words) {
@@ -97,7 +105,8 @@ public record PlaceFrame(
 
     private static String conditions(Review review) {
         Asked asked = review.asked();
-        return asked.hour().word() + ", " + asked.air().words() + " air, no cloud, ground "
+        return shortened(asked.scheme().name(), 60) + "; " + asked.hour().word() + ", "
+                + asked.air().words() + " air, no cloud, ground "
                 + QuantityFormat.atMost(review.shown().scene().surroundings().groundReflectance(), 3)
                         .plain();
     }
@@ -128,14 +137,16 @@ public record PlaceFrame(
     /** How many lights of each type have no position. */
     private static Stream<String> unplaced(Review review, Words words) {
         Scheme scheme = review.asked().scheme();
-        return review.shown().unplaced().stream().map(type -> {
-            int all = review.shown().scene().lamps().stream()
-                    .filter(lamp -> lamp.type().equals(type))
-                    .mapToInt(Lamp::count)
-                    .sum();
-            int placed = scheme.placementsOf(type).size();
-            return words.say("review.unplaced", type, Integer.toString(all - placed), Integer.toString(all));
-        });
+        return review.shown().unplaced().stream()
+                .flatMap(mark -> scheme.type(mark).stream())
+                .flatMap(type -> Amount.of(type.values().get("count").inUse()).stream()
+                        .map(BigDecimal::intValue)
+                        .map(all -> words.say(
+                                "review.unplaced",
+                                type.mark(),
+                                Integer.toString(
+                                        all - scheme.placementsOf(type.mark()).size()),
+                                Integer.toString(all))));
     }
 
     private static List<NumberRow> numbers(Assessment found, Observer here, Review review) {

@@ -51,8 +51,7 @@ public final class TypeNames {
     }
 
     private static String use(LuminaireType type) {
-        String use = type.values().text("use").strip();
-        return use.length() <= LONGEST ? use : use.substring(0, LONGEST - 1) + "…";
+        return PlaceFrame.shortened(type.values().text("use").strip(), LONGEST);
     }
 
     private static Name thereNow(LuminaireType type) {

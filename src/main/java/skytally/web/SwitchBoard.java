@@ -111,7 +111,7 @@ public final class SwitchBoard {
     }
 
     /** The same with one switch set another way. */
-    public String address(String path, String name, Choice choice, String part) {
-        return path + SwitchRow.address(query, name, choice.word()) + (part.isEmpty() ? "" : "#" + part);
+    public String address(String path, String name, String word, String part) {
+        return path + SwitchRow.address(query, name, word) + (part.isEmpty() ? "" : "#" + part);
     }
 }

@@ -76,6 +76,6 @@ class SwitchBoardTest {
     void goAlongToAnotherPage() {
         assertThat(asked("units=us&x=dark").address("/there")).isEqualTo("/there?units=us&x=dark");
         assertThat(asked(null).address("/there", "part")).isEqualTo("/there#part");
-        assertThat(asked("x=dark").address("/there", "x", Theme.DAY, "part")).isEqualTo("/there?x=day#part");
+        assertThat(asked("x=dark").address("/there", "x", "day", "part")).isEqualTo("/there?x=day#part");
     }
 }

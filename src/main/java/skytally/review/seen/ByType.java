@@ -13,7 +13,6 @@ import skytally.photometry.Illuminance;
 import skytally.review.Hour;
 import skytally.review.Review;
 import skytally.review.TypeNames;
-import skytally.scene.Lamp;
 import skytally.web.Switches.Units;
 
 /**
@@ -31,16 +30,16 @@ record ByType(String unit, @Nullable Written power, List<Row> rows, Row all) {
     private static final String NONE = "–";
 
     static ByType of(Review review, String place, TypeNames names, HarmCards.Doors doors) {
-        List<String> types = Stream.of(review.early(), review.late())
-                .flatMap(night -> night.scene().lamps().stream())
-                .map(Lamp::type)
-                .distinct()
-                .toList();
         Shares early = shares(review, place, Hour.EARLY);
         Shares late = shares(review, place, Hour.LATE);
+        List<String> types = Stream.of(early, late)
+                .flatMap(shares -> shares.all().stream())
+                .map(Share::type)
+                .distinct()
+                .toList();
         Units units = review.asked().units();
         double most = inUnit(Math.max(early.total(), late.total()), units);
-        int power = most > 0 && most < 1 ? 3 * (int) Math.floor(Math.log10(most) / 3) - 3 : 0;
+        int power = power(most);
         List<Row> rows = new ArrayList<>();
         for (String type : types) {
             rows.add(new Row(
@@ -64,6 +63,14 @@ record ByType(String unit, @Nullable Written power, List<Row> rows, Row all) {
                 door(review, place, Hour.LATE, doors));
         String unit = Quantity.light(1, 2, units).unit();
         return new ByType(unit, power == 0 ? null : new Written("10", power), rows, all);
+    }
+
+    /** Of ten, by threes, so that the most has at least two digits before the point. */
+    private static int power(double most) {
+        if (!(most > 0 && most < 1)) {
+            return 0;
+        }
+        return 3 * (int) Math.floor(Math.log10(most / 10) / 3);
     }
 
     private static Shares shares(Review review, String place, Hour hour) {

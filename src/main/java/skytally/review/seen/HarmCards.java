@@ -5,6 +5,7 @@ import java.util.List;
 import java.util.Optional;
 import java.util.function.BiFunction;
 import java.util.function.DoubleFunction;
+import java.util.function.UnaryOperator;
 import org.jspecify.annotations.Nullable;
 import skytally.assessment.Assessment;
 import skytally.assessment.Figure;
@@ -169,7 +170,8 @@ final class HarmCards {
         }
         worst("direct/worst-plane-illuminance", "Turned to where it is greatest, upright")
                 .ifPresent(says::add);
-        worst("window/worst-illuminance", "At the worst point of the window").ifPresent(says::add);
+        worst("direct/window-worst-illuminance", "At the worst point of the window")
+                .ifPresent(says::add);
         Whereabouts where = new Whereabouts(review.project(), place, observer);
         return new Card(
                 "Light on a surface",
@@ -205,7 +207,7 @@ final class HarmCards {
                     doors.here(skies),
                     " laid over the sky already there."));
         }
-        found.find(place.mark(), "glare/threshold-increment")
+        found.find(place.mark(), "travel/glare/threshold-increment")
                 .filter(increment -> increment.range().isPresent())
                 .ifPresent(increment -> says.add(new Said(
                         "For a driver: threshold increment ",
@@ -296,8 +298,14 @@ final class HarmCards {
         present.flatMap(Night::assessment)
                 .flatMap(night -> night.find(place.mark(), measure))
                 .filter(figure -> figure.range().isPresent())
-                .ifPresent(figure -> more.add(Said.words(
-                        "by what is there now: " + (figure.likely() > 0 ? written.apply(figure.likely()) : "none"))));
+                .ifPresent(figure -> more.add(
+                        figure.likely() > 0
+                                ? new Said(
+                                        "by what is there now: ",
+                                        written.apply(figure.likely()),
+                                        doors.present(figure),
+                                        "")
+                                : Said.words("by what is there now: none")));
         List<String> leftOut = review.shown().leftOut();
         if (!leftOut.isEmpty()) {
             more.add(Said.words("at least, without " + String.join(", ", leftOut)));
@@ -321,18 +329,25 @@ final class HarmCards {
     static final class Doors {
 
         private final BiFunction<Hour, String, String> address;
+        private final UnaryOperator<String> present;
         private final Hour hour;
 
         /**
-         * @param address of this page at an hour, with the part of it
+         * @param address of a part of this page at an hour
+         * @param present of a part of this page about what is there now
          */
-        Doors(Hour hour, BiFunction<Hour, String, String> address) {
+        Doors(Hour hour, BiFunction<Hour, String, String> address, UnaryOperator<String> present) {
             this.hour = hour;
             this.address = address;
+            this.present = present;
         }
 
         String here(Figure figure) {
             return "#" + NumberRow.door(figure);
+        }
+
+        String present(Figure figure) {
+            return present.apply(NumberRow.door(figure));
         }
 
         String at(Hour other, Figure figure) {

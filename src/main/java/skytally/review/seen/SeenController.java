@@ -50,9 +50,11 @@ class SeenController {
         Asked asked = opened.review().asked();
         Chosen<Harm> harm = board.choose("harm", Harm.values(), Harm.DIRECT, "who");
         Optional<Night> present = reviews.present(kept, asked);
+        String here = ReviewDesk.address(kept, ROOM, place.mark());
         HarmCards.Doors doors = new HarmCards.Doors(
                 asked.hour(),
-                (hour, part) -> board.address(ReviewDesk.address(kept, ROOM, place.mark()), Asked.HOUR, hour, part));
+                (hour, part) -> board.address(here, Asked.HOUR, hour.word(), part),
+                part -> board.address(here, Asked.SCHEME, asked.existing(kept.project()), part));
         WhoCauses.Address address = (mark, part) -> board.address(ReviewDesk.address(kept, ROOM, mark), part);
         ModelAndView page = desk.page("review/seen", opened);
         SeenPage.of(opened.review(), place, opened.frame(), present, harm.choice(), doors, address)

@@ -15,10 +15,10 @@ import skytally.charts.ShareDot;
 import skytally.figures.NumberRow;
 import skytally.figures.Quantity;
 import skytally.project.Place;
+import skytally.review.PlaceFrame;
 import skytally.review.Review;
 import skytally.review.TypeNames;
 import skytally.review.TypeNames.Name;
-import skytally.scene.Lamp;
 
 /**
  * Who causes what: every place a row, every type a column, each cell the share of one harm.
@@ -86,8 +86,9 @@ record WhoCauses(String says, List<Name> columns, List<Row> rows) {
             found.ifPresent(assessment -> review.project().places().stream()
                     .filter(place -> review.shown().observer(place.mark()).isPresent())
                     .forEach(place -> shares.put(place, Shares.of(assessment, place.mark(), harm.amount()))));
-            List<String> types = review.shown().scene().lamps().stream()
-                    .map(Lamp::type)
+            List<String> types = shares.values().stream()
+                    .flatMap(of -> of.all().stream())
+                    .map(Share::type)
                     .distinct()
                     .toList();
             List<String> kept = kept(types, shares);
@@ -142,10 +143,9 @@ record WhoCauses(String says, List<Name> columns, List<Row> rows) {
                         .orElse(new Cell(type, "", "–", false)));
             }
             Figure total = found.figure(place.mark(), harm.measure());
-            String what = place.values().text("what").strip();
             return new Row(
                     place.mark(),
-                    what.length() <= 40 ? what : what.substring(0, 39) + "…",
+                    PlaceFrame.shortened(PlaceFrame.name(place), 40),
                     address.of(place.mark(), ""),
                     place.mark().equals(here),
                     cells,

@@ -73,6 +73,9 @@ record WindowPicture(String wide, String narrow, String says) {
     }
 
     private static String level(double altitudeDeg) {
+        if (Math.abs(altitudeDeg) < 0.05) {
+            return "level";
+        }
         return degrees(Math.abs(altitudeDeg)) + (altitudeDeg < 0 ? " below level" : " above level");
     }
 
