@@ -52,8 +52,10 @@ class ArchitectureTest {
     private static final Map<String, List<String>> FEATURES = rooms("""
             storage    :
             web        :
+            figures    : assessment charts web
             project    : spectrum luminaire atmosphere scene charts web
-            firstlook  : spectrum luminaire atmosphere scene assessment charts web project
+            firstlook  : spectrum luminaire atmosphere scene assessment charts web figures project
+            review     : atmosphere scene assessment eye charts web figures project
             """);
 
     /** Beside the JDK, the core may use these and no others. */

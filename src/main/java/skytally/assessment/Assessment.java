@@ -73,12 +73,28 @@ public record Assessment(
      * @param measure its path, such as {@code direct/illuminance}
      */
     public Figure figure(String place, String measure) {
-        String key = key(place, measure, circumstance);
-        Figure figure = figures.get(key);
-        if (figure == null) {
-            throw new IllegalArgumentException("No figure has the key " + key);
-        }
-        return figure;
+        return find(place, measure)
+                .orElseThrow(() ->
+                        new IllegalArgumentException("No figure has the key " + key(place, measure, circumstance)));
+    }
+
+    /** The same, where it may be missing. */
+    public Optional<Figure> find(String place, String measure) {
+        return Optional.ofNullable(figures.get(key(place, measure, circumstance)));
+    }
+
+    /** The figures of one place, in the order of working. */
+    public List<Figure> figuresOf(String place) {
+        return figures.values().stream()
+                .filter(figure -> figure.key().startsWith(place + "/"))
+                .toList();
+    }
+
+    /** What limits the results of one place, in sentences. */
+    public List<Note> notesOf(String place) {
+        return notes.stream()
+                .filter(note -> note.place().isEmpty() || note.place().equals(place))
+                .toList();
     }
 
     /** The natural light a figure is like, if it is light at the eye and can be seen at all. */
@@ -95,11 +111,6 @@ public record Assessment(
         return influences.stream()
                 .filter(influence -> influence.figure().equals(figure.key()) && influence.strength() > 0)
                 .max(Comparator.comparingDouble(Influence::strength));
-    }
-
-    /** The figure of a place if it has one by that measure. */
-    public Optional<Figure> find(String place, String measure) {
-        return Optional.ofNullable(figures.get(key(place, measure, circumstance)));
     }
 
     public boolean has(Topic topic) {

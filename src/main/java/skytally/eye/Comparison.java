@@ -15,8 +15,17 @@ public record Comparison(NaturalAnchor anchor, double times) {
 
     /** The brightest natural light that is not brighter; none for a light fainter than the faintest star. */
     public static Optional<Comparison> of(Illuminance light, ZeroPoint zeroPoint) {
+        return of(light, zeroPoint, NaturalAnchor.Kind.POINT);
+    }
+
+    /** The same among skies: what they lay on level ground. None for a light less than that of the starlit sky. */
+    public static Optional<Comparison> onGround(Illuminance light, ZeroPoint zeroPoint) {
+        return of(light, zeroPoint, NaturalAnchor.Kind.GROUND);
+    }
+
+    private static Optional<Comparison> of(Illuminance light, ZeroPoint zeroPoint, NaturalAnchor.Kind kind) {
         return NaturalAnchors.all().stream()
-                .filter(anchor -> anchor.kind() == NaturalAnchor.Kind.POINT)
+                .filter(anchor -> anchor.kind() == kind)
                 .filter(anchor -> anchor.illuminance(zeroPoint).compareTo(light) <= 0)
                 .max(Comparator.comparing(anchor -> anchor.illuminance(zeroPoint)))
                 .map(anchor -> new Comparison(

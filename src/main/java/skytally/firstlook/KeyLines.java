@@ -10,16 +10,17 @@ import skytally.assessment.Figure;
 import skytally.assessment.Likeness;
 import skytally.assessment.Range;
 import skytally.atmosphere.Clearness;
+import skytally.figures.LikenessWords;
+import skytally.figures.NumberRow;
+import skytally.figures.Quantity;
+import skytally.figures.RangeText;
 import skytally.firstlook.FirstLookPage.KeyLine;
-import skytally.firstlook.FirstLookPage.RangeText;
 import skytally.notation.QuantityFormat;
 import skytally.notation.Written;
 import skytally.web.Switches.Units;
 
 /** The answers of the first look, each a number with what it means. */
 final class KeyLines {
-
-    private static final double LEAST_PERCENT = 0.01;
 
     private final Answer answer;
     private final Units units;
@@ -106,16 +107,9 @@ final class KeyLines {
         }
         Likeness like = found.get();
         if (like.inMoons()) {
-            String moons = like.times() >= 0.1
-                    ? times(like.times())
-                    : "about 1 part in "
-                            + QuantityFormat.significant(1 / like.times(), 2).plain() + " of";
-            return "That is " + moons + " " + like.natural() + "; no star is compared, as noted below.";
+            return "That is " + LikenessWords.of(like) + "; no star is compared, as noted below.";
         }
-        String besides = like.times() < 1.15
-                ? "About as much as " + like.natural()
-                : "About " + times(like.times()) + " " + like.natural();
-        return besides + "; equal to a star of magnitude "
+        return "About " + LikenessWords.of(like) + "; equal to a star of magnitude "
                 + QuantityFormat.decimals(likely(star), 1).digits() + " overhead.";
     }
 
@@ -158,13 +152,13 @@ final class KeyLines {
     private KeyLine skyGlow() {
         double increase = likely("zenith/sky/increase");
         String toward = "Toward the lights, 30° up: at least "
-                + percent(likely("toward-site/sky/increase")).plain()
+                + Quantity.increase(likely("toward-site/sky/increase")).plain()
                 + ", from " + brightness("toward-site/sky/natural-brightness") + " to "
                 + brightness("toward-site/sky/brightness") + "\u00a0mag/arcsec².";
         return new KeyLine(
                 "Sky glow overhead, on a clear night: at least",
                 door("zenith/sky/increase"),
-                new Quantity(percent(increase).number(), "% over the natural sky"),
+                new Quantity(Quantity.increase(increase).number(), "% over the natural sky"),
                 "none",
                 List.of(new Quantity(
                         new Written(
@@ -172,7 +166,7 @@ final class KeyLines {
                                         + brightness("zenith/sky/brightness"),
                                 0),
                         "mag/arcsec²")),
-                range("zenith/sky/increase", KeyLines::percent),
+                range("zenith/sky/increase", Quantity::increase),
                 List.of(
                         toward,
                         otherAirs(),
@@ -190,7 +184,7 @@ final class KeyLines {
         for (Clearness air : Clearness.values()) {
             Figure there = answer.airs().get(air);
             if (there != null) {
-                each.add("in " + air.words() + " air " + percent(there.likely()));
+                each.add("in " + air.words() + " air " + Quantity.increase(there.likely()));
             }
         }
         return "So far away the haze decides. Overhead, " + String.join(", ", each) + ".";
@@ -242,21 +236,8 @@ final class KeyLines {
                                 .plain() + " are lost.";
     }
 
-    /** Below a hundredth of a percent the digits say nothing. */
-    private static Quantity percent(double value) {
-        if (value > 0 && value < LEAST_PERCENT) {
-            return new Quantity(new Written("under 0.01", 0), "%");
-        }
-        Written written = QuantityFormat.significant(value, 2);
-        return new Quantity(new Written((value > 0 ? "+" : "") + written.digits(), written.power()), "%");
-    }
-
     private String brightness(String measure) {
         return QuantityFormat.decimals(likely(measure), 2).digits();
-    }
-
-    private static String times(double ratio) {
-        return QuantityFormat.significant(ratio, 2).plain() + " times";
     }
 
     private static String written(int whole) {
@@ -272,19 +253,10 @@ final class KeyLines {
     }
 
     private String door(String measure) {
-        return FirstLookPage.door(figure(measure));
+        return NumberRow.door(figure(measure));
     }
 
     private @Nullable RangeText range(String measure, DoubleFunction<Quantity> written) {
-        return figure(measure)
-                .range()
-                .filter(Range::isOpen)
-                .map(range -> {
-                    Quantity low = written.apply(range.low());
-                    Quantity high = written.apply(range.high());
-                    return new RangeText(low.number(), high.number(), high.unit());
-                })
-                .filter(range -> !range.low().equals(range.high()))
-                .orElse(null);
+        return RangeText.of(figure(measure), written).orElse(null);
     }
 }

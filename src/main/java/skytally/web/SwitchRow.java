@@ -2,6 +2,8 @@ package skytally.web;
 
 import java.util.Arrays;
 import java.util.List;
+import java.util.Map;
+import org.jspecify.annotations.Nullable;
 import org.springframework.web.util.UriComponentsBuilder;
 
 /**
@@ -16,24 +18,43 @@ public record SwitchRow(String name, List<Link> choices) {
      * @param word    the choice, as in an address and in messages: {@code switch.units.us}
      * @param href    the page's own address with this choice in place of the present one
      * @param current whether it is the one in force
+     * @param said    the choice in words, where people named it themselves; else nothing
      */
-    public record Link(String word, String href, boolean current) {}
+    public record Link(
+            String word,
+            String href,
+            boolean current,
+            @Nullable String said) {}
 
     static List<SwitchRow> of(Switches inForce, String query) {
         return List.of(
-                row("units", Switches.Units.values(), inForce.units(), query),
-                row("theme", Switches.Theme.values(), inForce.theme(), query));
+                of("units", Switches.Units.values(), inForce.units(), query, ""),
+                of("theme", Switches.Theme.values(), inForce.theme(), query, ""));
     }
 
-    private static SwitchRow row(String name, Switches.Choice[] choices, Switches.Choice inForce, String query) {
+    static SwitchRow of(String name, Switches.Choice[] choices, Switches.Choice inForce, String query, String part) {
+        String end = part.isEmpty() ? "" : "#" + part;
         return new SwitchRow(
                 name,
                 Arrays.stream(choices)
-                        .map(one -> new Link(one.word(), address(query, name, one.word()), one == inForce))
+                        .map(one ->
+                                new Link(one.word(), address(query, name, one.word()) + end, one.equals(inForce), null))
                         .toList());
     }
 
-    private static String address(String query, String name, String word) {
+    static SwitchRow named(String name, Map<String, String> choices, String inForce, String query) {
+        return new SwitchRow(
+                name,
+                choices.entrySet().stream()
+                        .map(one -> new Link(
+                                one.getKey(),
+                                address(query, name, one.getKey()),
+                                one.getKey().equals(inForce),
+                                one.getValue()))
+                        .toList());
+    }
+
+    static String address(String query, String name, String word) {
         return UriComponentsBuilder.newInstance()
                 .query(query)
                 .replaceQueryParam(name, word)

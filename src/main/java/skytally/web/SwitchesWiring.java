@@ -17,7 +17,7 @@ import org.springframework.web.servlet.HandlerInterceptor;
 import org.springframework.web.servlet.config.annotation.InterceptorRegistry;
 import org.springframework.web.servlet.config.annotation.WebMvcConfigurer;
 
-/** Lets a controller ask for {@link Switches} as an argument, and remembers the theme a person switched to. */
+/** Lets a controller ask for {@link Switches} or the {@link SwitchBoard} as an argument, and remembers the theme a person switched to. */
 @Configuration(proxyBeanMethods = false)
 class SwitchesWiring implements WebMvcConfigurer {
 
@@ -35,7 +35,7 @@ class SwitchesWiring implements WebMvcConfigurer {
 
         @Override
         public boolean supportsParameter(MethodParameter parameter) {
-            return parameter.getParameterType() == Switches.class;
+            return parameter.getParameterType() == Switches.class || parameter.getParameterType() == SwitchBoard.class;
         }
 
         @Override
@@ -48,7 +48,7 @@ class SwitchesWiring implements WebMvcConfigurer {
             if (asked == null) {
                 throw new IllegalStateException("Switches are read from an HTTP request");
             }
-            return Switches.of(asked);
+            return parameter.getParameterType() == Switches.class ? Switches.of(asked) : SwitchBoard.of(asked);
         }
     }
 

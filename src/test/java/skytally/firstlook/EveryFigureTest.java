@@ -21,6 +21,7 @@ import skytally.assessment.Assessor;
 import skytally.assessment.Circumstance;
 import skytally.assessment.Figure;
 import skytally.assessment.Working;
+import skytally.figures.NumberRow;
 import skytally.luminaire.Shape;
 import skytally.luminaire.Shapes;
 import skytally.web.Switches.Units;
@@ -109,16 +110,14 @@ class EveryFigureTest {
 
             assertThat(page.numbers())
                     .hasSameSizeAs(answer.assessment().figures().values());
-            assertThat(page.numbers()).extracting(FirstLookPage.NumberRow::id).doesNotHaveDuplicates();
+            assertThat(page.numbers()).extracting(NumberRow::id).doesNotHaveDuplicates();
             assertPlain(page.heading());
             assertPlain(page.guessesHead());
             assertPlain(page.ladder().says());
             assertPlain(page.ladder().svg());
             assertThat(page.lines()).hasSizeBetween(4, 5).allSatisfy(line -> {
                 assertPlain(line.toString().replace("range=null", "").replace("figure=null", ""));
-                assertThat(page.numbers())
-                        .extracting(FirstLookPage.NumberRow::id)
-                        .contains(line.door());
+                assertThat(page.numbers()).extracting(NumberRow::id).contains(line.door());
             });
         }
     }

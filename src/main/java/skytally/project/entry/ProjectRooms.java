@@ -17,6 +17,8 @@ class ProjectRooms {
             new Room("lights", "lights"),
             new Room("places", "places"),
             new Room("plan", "plan"),
+            new Room("seen", "seen"),
+            new Room("sky", "sky"),
             new Room("history", "history"));
 
     /**

@@ -1,4 +1,4 @@
-package skytally.firstlook;
+package skytally.figures;
 
 import skytally.notation.QuantityFormat;
 import skytally.notation.Written;
@@ -11,7 +11,7 @@ import skytally.web.Switches.Units;
  * @param number written out
  * @param unit   as printed after it
  */
-record Quantity(Written number, String unit) {
+public record Quantity(Written number, String unit) {
 
     private static final double METRES_PER_FOOT = 0.3048;
     private static final double METRES_PER_MILE = 1609.344;
@@ -20,14 +20,16 @@ record Quantity(Written number, String unit) {
     /** Less light than any eye or meter tells from none. */
     private static final double LEAST_LX = 1e-12;
 
-    static Quantity lux(double lux, int figures) {
+    private static final double LEAST_PERCENT = 0.01;
+
+    public static Quantity lux(double lux, int figures) {
         if (lux > 0 && lux < LEAST_LX) {
             return new Quantity(new Written("under 1", -12), "lx");
         }
         return new Quantity(QuantityFormat.significant(lux, figures), "lx");
     }
 
-    static Quantity footcandles(double lux, int figures) {
+    public static Quantity footcandles(double lux, int figures) {
         if (lux > 0 && lux < LEAST_LX) {
             return new Quantity(new Written("under 1", -13), "fc");
         }
@@ -35,16 +37,16 @@ record Quantity(Written number, String unit) {
     }
 
     /** In the unit the reader asked for. */
-    static Quantity light(double lux, int figures, Units units) {
+    public static Quantity light(double lux, int figures, Units units) {
         return units == Units.US ? footcandles(lux, figures) : lux(lux, figures);
     }
 
     /** In the other unit. */
-    static Quantity lightOtherwise(double lux, int figures, Units units) {
+    public static Quantity lightOtherwise(double lux, int figures, Units units) {
         return units == Units.US ? lux(lux, figures) : footcandles(lux, figures);
     }
 
-    static Quantity length(double metres, int figures, Units units) {
+    public static Quantity length(double metres, int figures, Units units) {
         boolean feet = units == Units.US;
         if (metres >= FAR_M) {
             double far = feet ? metres / METRES_PER_MILE : metres / 1000;
@@ -58,7 +60,7 @@ record Quantity(Written number, String unit) {
     }
 
     /** Luminance in the step that leaves the number readable: µcd/m², mcd/m² or cd/m². */
-    static Quantity luminance(double cdM2, int figures) {
+    public static Quantity luminance(double cdM2, int figures) {
         if (cdM2 == 0 || cdM2 >= 0.1) {
             return new Quantity(QuantityFormat.significant(cdM2, figures), "cd/m²");
         }
@@ -67,12 +69,21 @@ record Quantity(Written number, String unit) {
                 : new Quantity(QuantityFormat.significant(cdM2 * 1e6, figures), "µcd/m²");
     }
 
-    static Quantity magnitude(double value, int decimals) {
+    public static Quantity magnitude(double value, int decimals) {
         return new Quantity(QuantityFormat.decimals(value, decimals), "mag");
     }
 
-    static Quantity skyBrightness(double value, int decimals) {
+    public static Quantity skyBrightness(double value, int decimals) {
         return new Quantity(QuantityFormat.decimals(value, decimals), "mag/arcsec²");
+    }
+
+    /** A percentage with its sign; below a hundredth of a percent the digits say nothing. */
+    public static Quantity increase(double percent) {
+        if (percent > 0 && percent < LEAST_PERCENT) {
+            return new Quantity(new Written("under 0.01", 0), "%");
+        }
+        Written written = QuantityFormat.significant(percent, 2);
+        return new Quantity(new Written((percent > 0 ? "+" : "") + written.digits(), written.power()), "%");
     }
 
     /** The unit with the no-break space that belongs before it; none before a degree sign. */
@@ -81,7 +92,7 @@ record Quantity(Written number, String unit) {
     }
 
     /** All in one piece of text, number and unit kept on one line. */
-    String plain() {
+    public String plain() {
         return number.plain() + spacedUnit();
     }
 
