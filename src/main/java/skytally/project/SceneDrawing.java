@@ -108,7 +108,7 @@ public final class SceneDrawing {
                 drawing.observers(),
                 drawing.surroundings(air),
                 Optional.of(drawing.present()),
-                List.of());
+                drawing.boundary());
         return new Drawn(drawing.open(scene), List.copyOf(drawing.leftOut), List.copyOf(drawing.unplaced));
     }
 
@@ -376,7 +376,11 @@ public final class SceneDrawing {
                     Direction.toward(Math.toRadians(look.bearingDeg()), Math.toRadians(look.altitudeDeg()))));
         }
         if (place.values().text("kind").equals("road-user")) {
-            looks.add(new Look(Look.TRAVEL, Look.Purpose.ROAD, Direction.toward(facing, -ROAD_DIP_RAD)));
+            double travel = number(Subject.PLACE, "travelDirection", place.values()).stream()
+                    .map(Math::toRadians)
+                    .findFirst()
+                    .orElse(facing);
+            looks.add(new Look(Look.TRAVEL, Look.Purpose.ROAD, Direction.toward(travel, -ROAD_DIP_RAD)));
         }
         return new Observer(
                 place.mark(),
@@ -385,7 +389,20 @@ public final class SceneDrawing {
                 looks,
                 pane(place.values()),
                 roadLuminance(place.values()),
-                GroundLine.OPEN);
+                groundToward(place));
+    }
+
+    private GroundLine groundToward(Place place) {
+        return new GroundLine(place.ground().stream()
+                .map(point -> new GroundLine.Point(point.distanceM(), point.heightM() - baseM))
+                .toList());
+    }
+
+    /** Corners of the property line, at the height of the site's ground. */
+    private List<Position> boundary() {
+        return Outline.of(project.site()).map(Outline::corners).orElse(List.of()).stream()
+                .map(corner -> new Position(corner.eastM(), corner.northM(), siteGroundM() - baseM))
+                .toList();
     }
 
     private static Optional<Pane> pane(Values values) {

@@ -6,6 +6,7 @@ import org.springframework.http.HttpStatus;
 import org.springframework.stereotype.Component;
 import org.springframework.web.server.ResponseStatusException;
 import org.springframework.web.servlet.ModelAndView;
+import skytally.assessment.Scope.Others;
 import skytally.project.KeptProject;
 import skytally.project.Place;
 import skytally.project.entry.ProjectDesk;
@@ -50,10 +51,11 @@ public class ReviewDesk {
     /**
      * Opens one place.
      *
-     * @param room the last part of the page's address before the place
+     * @param room   the last part of the page's address before the place
+     * @param others what the page says of the other places
      */
-    public Opened open(KeptProject kept, String room, Place place, SwitchBoard board) {
-        Review review = reviews.of(kept, Asked.of(board, kept.project()));
+    public Opened open(KeptProject kept, String room, Place place, SwitchBoard board, Others others) {
+        Review review = reviews.of(kept, Asked.of(board, kept.project()), place.mark(), others);
         List<PlaceLink> links = kept.project().places().stream()
                 .map(each -> new PlaceLink(
                         each.mark(),

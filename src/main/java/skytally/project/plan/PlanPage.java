@@ -1,14 +1,14 @@
 package skytally.project.plan;
 
-import java.math.BigDecimal;
+
 import java.util.ArrayList;
 import java.util.List;
 import java.util.Map;
 import java.util.Objects;
 import java.util.Optional;
 import java.util.function.Function;
-import java.util.regex.Matcher;
-import java.util.regex.Pattern;
+
+
 import java.util.stream.Collectors;
 import java.util.stream.Stream;
 import org.jspecify.annotations.Nullable;
@@ -19,13 +19,13 @@ import skytally.charts.SitePlan.Point;
 import skytally.charts.SitePlan.Unit;
 import skytally.geometry.Position;
 import skytally.notation.QuantityFormat;
-import skytally.project.Claim;
+
 import skytally.project.LuminaireType;
 import skytally.project.Place;
 import skytally.project.Placement;
 import skytally.project.Project;
 import skytally.project.Scheme;
-import skytally.project.Units;
+import skytally.project.Outline;
 import skytally.project.Values;
 import skytally.project.entry.Amount;
 import skytally.project.entry.Spot;
@@ -68,8 +68,6 @@ record PlanPage(
     private static final double LEAST_BESIDE_M = 50;
 
     /** What lies farther is no corner of a site. */
-    private static final double FARTHEST_M = 1_000_000;
-    private static final Pattern CORNER = Pattern.compile("(-?\\d+(?:\\.\\d+)?)[\\s,]+(-?\\d+(?:\\.\\d+)?)");
 
     /** A scheme that may be drawn. */
     record Choice(String mark, String name, boolean current) {}
@@ -129,21 +127,10 @@ record PlanPage(
                                 scheme, Objects.requireNonNull(types.get(light.type())), light, spot)));
     }
 
-    /** Pairs of numbers, east and north, however they are set apart. */
     private static List<Point> outline(Values site) {
-        Claim claim = site.get("outline").inUse();
-        List<Point> corners = new ArrayList<>();
-        Matcher pairs = CORNER.matcher(claim.value().replace('−', '-'));
-        while (pairs.find()) {
-            corners.add(new Point(metres(pairs.group(1), claim.unit()), metres(pairs.group(2), claim.unit())));
-        }
-        return corners.stream()
-                .filter(corner -> Math.hypot(corner.eastM(), corner.northM()) <= FARTHEST_M)
+        return Outline.of(site).map(Outline::corners).orElse(List.of()).stream()
+                .map(corner -> new Point(corner.eastM(), corner.northM()))
                 .toList();
-    }
-
-    private static double metres(String number, String unit) {
-        return Units.inFirst(new BigDecimal(number), unit).doubleValue();
     }
 
     private static List<Picture> pictures(

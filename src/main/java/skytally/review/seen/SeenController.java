@@ -6,6 +6,7 @@ import org.springframework.stereotype.Controller;
 import org.springframework.web.bind.annotation.GetMapping;
 import org.springframework.web.bind.annotation.PathVariable;
 import org.springframework.web.servlet.ModelAndView;
+import skytally.assessment.Scope.Others;
 import skytally.project.KeptProject;
 import skytally.project.Place;
 import skytally.review.Asked;
@@ -46,10 +47,11 @@ class SeenController {
     }
 
     private ModelAndView page(KeptProject kept, Place place, SwitchBoard board) {
-        Opened opened = desk.open(kept, ROOM, place, board);
-        Asked asked = opened.review().asked();
         Chosen<Harm> harm = board.choose("harm", Harm.values(), Harm.DIRECT, "who");
-        Optional<Night> present = reviews.present(kept, asked);
+        Others others = harm.choice() == Harm.GLOW ? Others.DIRECT_AND_OVERHEAD : Others.DIRECT;
+        Opened opened = desk.open(kept, ROOM, place, board, others);
+        Asked asked = opened.review().asked();
+        Optional<Night> present = reviews.present(kept, asked, place.mark());
         String here = ReviewDesk.address(kept, ROOM, place.mark());
         HarmCards.Doors doors = new HarmCards.Doors(
                 asked.hour(),

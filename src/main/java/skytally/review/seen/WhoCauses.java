@@ -142,15 +142,16 @@ record WhoCauses(String says, List<Name> columns, List<Row> rows) {
                         .map(share -> cell(type, share, share.percent() == most))
                         .orElse(new Cell(type, "", "–", false)));
             }
-            Figure total = found.figure(place.mark(), harm.measure());
+            // a place that is not looked at itself may have its shares only, whose sum is the figure
+            Optional<Figure> total = found.find(place.mark(), harm.measure());
             return new Row(
                     place.mark(),
                     PlaceFrame.shortened(PlaceFrame.name(place), 40),
                     address.of(place.mark(), ""),
                     place.mark().equals(here),
                     cells,
-                    of.total() > 0 ? harm.written(total.likely(), review.asked().units()) : null,
-                    address.of(place.mark(), NumberRow.door(total)));
+                    of.total() > 0 ? harm.written(of.total(), review.asked().units()) : null,
+                    address.of(place.mark(), total.map(NumberRow::door).orElse("")));
         }
 
         private static Cell cell(String type, Share share, boolean most) {

@@ -5,6 +5,7 @@ import org.springframework.stereotype.Controller;
 import org.springframework.web.bind.annotation.GetMapping;
 import org.springframework.web.bind.annotation.PathVariable;
 import org.springframework.web.servlet.ModelAndView;
+import skytally.assessment.Scope.Others;
 import skytally.project.KeptProject;
 import skytally.project.Place;
 import skytally.review.ReviewDesk;
@@ -42,7 +43,7 @@ class SkyController {
     }
 
     private ModelAndView page(KeptProject kept, Place place, SwitchBoard board) {
-        Opened opened = desk.open(kept, ROOM, place, board);
+        Opened opened = desk.open(kept, ROOM, place, board, Others.NOTHING);
         ModelAndView page = desk.page("review/sky", opened);
         SkyPage.of(opened.review(), place, opened.frame(), reviews.otherAirs(kept, opened.review(), place.mark()))
                 .ifPresent(sky -> page.addObject("sky", sky));
