@@ -39,7 +39,7 @@ record SkyLight(double lampsCdM2, double groundCdM2, double johnsonV) {
             SpectralSum spectrum = SpectralSum.of(lamp.spectrum());
             double lumens = lamp.allFlux().lumens();
             double returned = lumens
-                    * (1 - FluxShare.upward(lamp.light(), lamp.attitude()))
+                    * FluxShare.downward(lamp.light(), lamp.attitude())
                     * scene.surroundings().groundReflectance();
 
             double[] fromLamp = air.radiance(emission(lamp, eye), line);
