@@ -4,17 +4,14 @@ import java.util.ArrayList;
 import java.util.HashMap;
 import java.util.List;
 import java.util.Map;
-import java.util.Optional;
 import java.util.OptionalDouble;
 import java.util.stream.Stream;
 import skytally.atmosphere.Aerosol;
 import skytally.atmosphere.Atmosphere;
 import skytally.atmosphere.Clearness;
-import skytally.geometry.Attitude;
 import skytally.geometry.Direction;
 import skytally.geometry.Position;
-import skytally.luminaire.Shape;
-import skytally.luminaire.Shapes;
+import skytally.luminaire.FittedShape;
 import skytally.photometry.LuminousFlux;
 import skytally.project.Field.Subject;
 import skytally.scene.Known;
@@ -33,7 +30,8 @@ import skytally.spectrum.SpectralClasses;
  *
  * <p>Heights are reckoned from the lowest ground of any light or place, so that none is negative. Existing lights stay
  * unless they are marked as removed. A type without lumens and without watts is left out and named; a light without a
- * position stands at the reference point and is named.
+ * position stands at the reference point and is named. A light that is not the same all round and has no bearing faces
+ * true north and is named: to turn it toward each place in turn would be a different proposal for each of them.
  */
 public final class SceneDrawing {
 
@@ -46,6 +44,7 @@ public final class SceneDrawing {
     private final List<Lamp> lamps = new ArrayList<>();
     private final List<String> leftOut = new ArrayList<>();
     private final List<String> unplaced = new ArrayList<>();
+    private final List<String> unaimed = new ArrayList<>();
     private final Map<String, Map<Property, Known>> known = new HashMap<>();
 
     /** Before the curfew or after it: which of a type's outputs counts. */
@@ -78,14 +77,19 @@ public final class SceneDrawing {
      * @param scene    to be assessed; without ranges
      * @param leftOut  marks of types that could not be reckoned with, so that sums are "at least"
      * @param unplaced marks of types some of whose lights have no position
+     * @param unaimed  marks of types some of whose lights face nobody knows where, although it matters
      */
-    public record Drawn(OpenScene scene, List<String> leftOut, List<String> unplaced) {}
+    public record Drawn(OpenScene scene, List<String> leftOut, List<String> unplaced, List<String> unaimed) {}
 
     /** The scene of one scheme in one period of the night. */
     public static Drawn of(Project project, Scheme scheme, Period period) {
         SceneDrawing drawing = new SceneDrawing(project, scheme, period);
         Scene scene = new Scene(drawing.lamps, drawing.observers(), drawing.surroundings());
-        return new Drawn(drawing.open(scene), List.copyOf(drawing.leftOut), List.copyOf(drawing.unplaced));
+        return new Drawn(
+                drawing.open(scene),
+                List.copyOf(drawing.leftOut),
+                List.copyOf(drawing.unplaced),
+                List.copyOf(drawing.unaimed));
     }
 
     private OpenScene open(Scene scene) {
@@ -142,42 +146,28 @@ public final class SceneDrawing {
     }
 
     private void draw(LuminaireType type, List<Placement> lights, boolean asExisting) {
-        Optional<Reading> lumens = lumens(type.values());
-        if (lumens.isEmpty()) {
+        TypeLight light = TypeLight.of(type.values());
+        if (light.lumens().isEmpty()) {
             leftOut.add(type.mark());
             return;
         }
         String mark = asExisting ? "existing-" + type.mark() : type.mark();
-        LampType drawn = new LampType(mark, type.values(), lumens.get());
-        known.put(mark, drawn.states());
+        LampType drawn = new LampType(mark, type.values(), light, light.lumens().get());
         int count = number(Subject.TYPE, "count", type.values()).stream()
                 .mapToInt(stated -> (int) stated)
                 .findFirst()
                 .orElse(lights.size());
-        for (Placement light : lights) {
-            lamps.add(drawn.hung(light));
+        for (Placement placed : lights) {
+            lamps.add(drawn.hung(placed));
         }
         if (count > lights.size()) {
             unplaced.add(type.mark());
             lamps.add(drawn.atReference(count - lights.size()));
         }
-    }
-
-    /** Lumens as stated, or watts times an efficacy. */
-    private static Optional<Reading> lumens(Values values) {
-        Optional<Reading> stated = Reading.of(Subject.TYPE, "lumens", values);
-        if (stated.isPresent()) {
-            return stated;
+        if (drawn.lacksBearing) {
+            unaimed.add(type.mark());
         }
-        Optional<Reading> watts = Reading.of(Subject.TYPE, "watts", values);
-        Optional<Reading> efficacy = Reading.of(Subject.TYPE, "efficacy", values);
-        if (watts.isEmpty() || efficacy.isEmpty()) {
-            return Optional.empty();
-        }
-        double lumens = watts.get().number() * efficacy.get().number();
-        return Optional.of(new Reading(
-                Double.toString(lumens),
-                Known.assumed("watts times " + efficacy.get().text() + " lm/W: low confidence")));
+        known.put(mark, drawn.states());
     }
 
     /** What all lights of one type have in common. */
@@ -185,18 +175,17 @@ public final class SceneDrawing {
 
         private final String mark;
         private final Values values;
-        private final Reading lumens;
-        private final Reading shapeId;
+        private final TypeLight light;
+        private final TypeLight.Amount lumens;
         private final Reading spectralClass;
-        private final Shape shape;
+        private boolean lacksBearing;
 
-        LampType(String mark, Values values, Reading lumens) {
+        LampType(String mark, Values values, TypeLight light, TypeLight.Amount lumens) {
             this.mark = mark;
             this.values = values;
+            this.light = light;
             this.lumens = lumens;
-            this.shapeId = required("shape");
             this.spectralClass = required("spectralClass");
-            this.shape = Shapes.byId(shapeId.text()).orElseThrow();
         }
 
         private Reading required(String field) {
@@ -206,58 +195,52 @@ public final class SceneDrawing {
         Map<Property, Known> states() {
             Map<Property, Known> states = new HashMap<>();
             states.put(Property.LUMENS, lumens.known());
-            states.put(Property.SHAPE, shapeId.known());
+            states.put(Property.SHAPE, light.shapeKnown());
             states.put(Property.SPECTRUM, spectralClass.known());
-            states.put(Property.TILT, required("tilt").known());
+            states.put(Property.TILT, light.tiltKnown());
+            states.put(Property.BEARING, light.bearingKnown(lacksBearing));
             states.put(Property.MOUNTING_HEIGHT, required("mountingHeight").known());
             states.put(Property.COUNT, Known.workedOut("the lights of the plan"));
             return states;
         }
 
-        Lamp hung(Placement light) {
+        Lamp hung(Placement placed) {
             double ground =
-                    number(Subject.LIGHT, "groundHeight", light.values()).orElse(siteGroundM());
+                    number(Subject.LIGHT, "groundHeight", placed.values()).orElse(siteGroundM());
             Position at = new Position(
-                    number(Subject.LIGHT, "east", light.values()).orElse(0),
-                    number(Subject.LIGHT, "north", light.values()).orElse(0),
-                    ground - baseM + own(light, "mountingHeight"));
-            return lamp(light.mark(), 1, at, attitude(light.values()));
+                    number(Subject.LIGHT, "east", placed.values()).orElse(0),
+                    number(Subject.LIGHT, "north", placed.values()).orElse(0),
+                    ground - baseM + own(placed, "mountingHeight"));
+            return lamp(placed.mark(), 1, at, placed.values());
         }
 
         Lamp atReference(int count) {
             double height = siteGroundM() - baseM + required("mountingHeight").number();
-            return lamp(mark + "-unplaced", count, new Position(0, 0, height), attitude(Values.NONE));
+            return lamp(mark + "-unplaced", count, new Position(0, 0, height), Values.NONE);
         }
 
-        private Attitude attitude(Values own) {
-            double bearing = number(Subject.LIGHT, "bearing", own)
-                    .orElse(number(Subject.TYPE, "bearing", values).orElse(0));
-            double tilt =
-                    number(Subject.LIGHT, "tilt", own).orElse(required("tilt").number());
-            double roll =
-                    number(Subject.LIGHT, "roll", own).orElse(required("roll").number());
-            return new Attitude(bearing, tilt, roll);
-        }
-
-        private double own(Placement light, String field) {
-            return number(Subject.LIGHT, field, light.values())
+        private double own(Placement placed, String field) {
+            return number(Subject.LIGHT, field, placed.values())
                     .orElse(required(field).number());
         }
 
-        private Lamp lamp(String lampMark, int count, Position at, Attitude attitude) {
-            double size = number(Subject.TYPE, "luminousSize", values).orElse(shape.luminousSizeM());
+        private Lamp lamp(String lampMark, int count, Position at, Values own) {
+            lacksBearing |= light.lacksBearing(own);
+            FittedShape shape = light.shape();
+            double size = number(Subject.TYPE, "luminousSize", values)
+                    .orElse(shape.shape().luminousSizeM());
             return new Lamp(
                     lampMark,
                     mark,
                     count,
                     at,
-                    attitude,
+                    light.hang(own),
                     new LuminousFlux(
-                            lumens.number() * required(period.outputField).number() / 100),
-                    shape.distribution(),
+                            lumens.value() * required(period.outputField).number() / 100),
+                    shape.light(),
                     SpectralClasses.byId(spectralClass.text()).orElseThrow().spectrum(),
                     size,
-                    shape.nearestM());
+                    shape.nearestM(size));
         }
     }
 
