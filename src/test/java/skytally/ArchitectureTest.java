@@ -52,8 +52,9 @@ class ArchitectureTest {
     private static final Map<String, List<String>> FEATURES = rooms("""
             storage    :
             web        :
-            project    : spectrum luminaire atmosphere scene web
+            project    : spectrum luminaire atmosphere scene charts web
             firstlook  : spectrum luminaire atmosphere scene assessment charts web project
+            guide      : spectrum luminaire charts web project firstlook
             """);
 
     /** Beside the JDK, the core may use these and no others. */

@@ -1,5 +1,8 @@
 package skytally.project;
 
+import java.util.HashMap;
+import java.util.List;
+import java.util.Map;
 import java.util.Optional;
 import java.util.OptionalDouble;
 import java.util.stream.Stream;
@@ -216,6 +219,23 @@ public final class TypeLight {
     /** Share above the level with the type's own tilt, as reckoned with; 0 to 1. */
     public double upwardShare() {
         return FluxShare.upward(shape.light(), hang());
+    }
+
+    /** Share above the level of lights of the type, all together and each as it hangs itself; 0 to 1. */
+    public double upwardShare(List<Values> lights) {
+        Map<Attitude, Double> byHang = new HashMap<>();
+        double up = 0;
+        for (Values light : lights) {
+            Attitude own = hang(light);
+            Attitude north = new Attitude(0, own.tiltDeg(), own.rollDeg());
+            up += byHang.computeIfAbsent(north, hang -> FluxShare.upward(shape.light(), hang));
+        }
+        return up / lights.size();
+    }
+
+    /** The tilt of one light of the type: its own, else the type's. */
+    public double tiltDeg(Values light) {
+        return own(light, "tilt").orElse(tiltDeg());
     }
 
     /** Share between the level and 10° above it with the type's own tilt, as reckoned with; 0 to 1. */
