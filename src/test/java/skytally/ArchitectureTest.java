@@ -56,6 +56,7 @@ class ArchitectureTest {
             project    : spectrum luminaire atmosphere scene charts web
             firstlook  : spectrum luminaire atmosphere scene assessment charts web figures project
             review     : atmosphere scene assessment eye charts web figures project
+            guide      : spectrum luminaire charts web project firstlook
             """);
 
     /** Beside the JDK, the core may use these and no others. */

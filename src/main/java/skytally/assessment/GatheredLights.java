@@ -92,25 +92,25 @@ final class GatheredLights {
 
     GatheredLights(List<Lamp> lamps) {
         Map<Strand, Integer> index = new LinkedHashMap<>();
-        Map<Bundle.Key, Double> upward = new LinkedHashMap<>();
+        Map<Bundle.Key, Double> downward = new LinkedHashMap<>();
         List<Node> leaves = new ArrayList<>();
         for (Lamp lamp : lamps) {
             double lumens = lamp.allFlux().lumens();
             if (lumens > 0) {
                 int strand = index.computeIfAbsent(new Strand(lamp.type(), lamp.spectrum()), key -> index.size());
-                leaves.add(leaf(lamp, strand, lumens, upward));
+                leaves.add(leaf(lamp, strand, lumens, downward));
             }
         }
         strands = List.copyOf(index.keySet());
         roots = leaves.isEmpty() ? List.of() : List.of(gathered(leaves));
     }
 
-    private static Node leaf(Lamp lamp, int strand, double lumens, Map<Bundle.Key, Double> upward) {
+    private static Node leaf(Lamp lamp, int strand, double lumens, Map<Bundle.Key, Double> downward) {
         Attitude attitude = plain(lamp);
-        double up = upward.computeIfAbsent(
-                new Bundle.Key(strand, lamp.light(), attitude), key -> FluxShare.upward(lamp.light(), attitude));
+        double down = downward.computeIfAbsent(
+                new Bundle.Key(strand, lamp.light(), attitude), key -> FluxShare.downward(lamp.light(), attitude));
         Bundle bundle = new Bundle(
-                strand, lamp.light(), attitude, attitude.rotation(), lumens, lumens * Math.max(0, 1 - up));
+                strand, lamp.light(), attitude, attitude.rotation(), lumens, lumens * down);
         return new Node(lamp.position(), lamp.groundHeightM(), 0, List.of(bundle), List.of());
     }
 

@@ -79,6 +79,10 @@ final class GuessRows {
     }
 
     private String words(Blank blank, String value) {
+        return words(blank, value, units);
+    }
+
+    static String words(Blank blank, String value, Units units) {
         return switch (blank) {
             case SPECTRAL_CLASS -> SpectralClasses.byId(value).orElseThrow().label();
             case SHAPE -> Shapes.byId(value).orElseThrow().words();

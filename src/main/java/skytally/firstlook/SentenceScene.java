@@ -58,7 +58,7 @@ final class SentenceScene implements OpenScene {
             case LUMENS -> Blank.LUMENS;
             case SPECTRUM -> Blank.SPECTRAL_CLASS;
             case SHAPE -> Blank.SHAPE;
-            case TILT -> Blank.TILT;
+            case TILT, BEARING -> Blank.TILT; // the tilt is typed as one toward the eye
             case MOUNTING_HEIGHT -> Blank.MOUNTING_HEIGHT;
             case EYE_HEIGHT -> Blank.EYE_HEIGHT;
             case DISTANCE -> Blank.DISTANCE;

@@ -1,6 +1,7 @@
 package skytally.luminaire;
 
 import java.util.Arrays;
+import java.util.function.ToDoubleFunction;
 import org.hipparchus.analysis.integration.gauss.GaussIntegrator;
 import org.hipparchus.analysis.integration.gauss.GaussIntegratorFactory;
 import skytally.geometry.Attitude;
@@ -37,13 +38,20 @@ public final class FluxShare {
 
     /** ULR: share at and above the level, as the luminaire hangs; 0 to 1. */
     public static double upward(IntensityDistribution light, Attitude attitude) {
-        return new FluxShare(light, attitude).above(0);
+        return greatest(light, attitude, share -> share.above(0));
+    }
+
+    /**
+     * Share below the level, as the luminaire hangs; 0 to 1. What is left of the share above, unless the light is the
+     * brighter of several: then what it sends down is the most any of them does, as is what it sends up.
+     */
+    public static double downward(IntensityDistribution light, Attitude attitude) {
+        return greatest(light, attitude, share -> 1 - share.above(0));
     }
 
     /** Share between the level and 10° above it, as the luminaire hangs; 0 to 1. */
     public static double low(IntensityDistribution light, Attitude attitude) {
-        FluxShare share = new FluxShare(light, attitude);
-        return Math.max(0, share.above(0) - share.above(LOW_RAD));
+        return greatest(light, attitude, share -> Math.max(0, share.above(0) - share.above(LOW_RAD)));
     }
 
     /** Share above an altitude of −90° to 90° (in radians); over −90° it is all of it, 1. */
@@ -51,16 +59,33 @@ public final class FluxShare {
         if (!(Math.abs(altitudeRad) <= Math.PI / 2 + 1e-12)) {
             throw new IllegalArgumentException("Altitude must be -π/2 to π/2, not " + altitudeRad);
         }
-        return new FluxShare(light, attitude).above(altitudeRad);
+        return greatest(light, attitude, share -> share.above(altitudeRad));
+    }
+
+    /** The integral over the whole sphere: 1, and more for one that takes the brighter of several. */
+    static double inAll(IntensityDistribution light) {
+        return new FluxShare(light, Attitude.LEVEL).sum(-Math.PI / 2);
+    }
+
+    private static double greatest(IntensityDistribution light, Attitude attitude, ToDoubleFunction<FluxShare> share) {
+        double greatest = 0;
+        for (IntensityDistribution reading : light.readings()) {
+            greatest = Math.max(greatest, share.applyAsDouble(new FluxShare(reading, attitude)));
+        }
+        return greatest;
     }
 
     private double above(double altitudeRad) {
+        return Math.min(1, sum(altitudeRad)); // a rounding over would leave less than nothing
+    }
+
+    private double sum(double altitudeRad) {
         double[] cuts = cuts(altitudeRad);
         double sum = 0;
         for (int i = 1; i < cuts.length; i++) {
             sum += piece(cuts[i - 1], cuts[i], StrictMath.sin(altitudeRad));
         }
-        return Math.min(1, sum); // the sum may be a rounding over, and what is left of one would be less than nothing
+        return sum;
     }
 
     private double[] cuts(double altitudeRad) {

@@ -31,6 +31,24 @@ public record Shape(
         return distribution instanceof TurnedUp;
     }
 
+    /** Whether it is a beam, which may be wider or narrower than its name says. */
+    public boolean hasWidth() {
+        return narrowestBeamDeg < 180;
+    }
+
+    /**
+     * The same beam with another width.
+     *
+     * @param widthDeg full width at half the peak, 1 to 120 degrees
+     */
+    public IntensityDistribution ofWidth(double widthDeg) {
+        if (!hasWidth()) {
+            throw new IllegalStateException("The shape " + id + " is no beam");
+        }
+        IntensityDistribution beam = Beam.ofWidth(widthDeg);
+        return facesUp() ? new TurnedUp(beam) : beam;
+    }
+
     /** The distance from which the inverse-square law holds for this shape. */
     public double nearestM() {
         return (narrowestBeamDeg < 10 ? 10 : 5) * luminousSizeM;

@@ -10,11 +10,9 @@ import java.util.stream.Stream;
 import skytally.atmosphere.Aerosol;
 import skytally.atmosphere.Atmosphere;
 import skytally.atmosphere.Clearness;
-import skytally.geometry.Attitude;
 import skytally.geometry.Direction;
 import skytally.geometry.Position;
-import skytally.luminaire.Shape;
-import skytally.luminaire.Shapes;
+import skytally.luminaire.FittedShape;
 import skytally.photometry.LuminousFlux;
 import skytally.project.Field.Subject;
 import skytally.scene.GroundLine;
@@ -37,7 +35,9 @@ import skytally.spectrum.SpectralClasses;
  * <p>Outputs are those stated; where none is, those that the hours give. Heights are reckoned from the lowest ground of
  * any light or place, so that none is negative. Existing lights stay unless they are marked as removed. A type without
  * lumens and without watts, or without a count and a position, is left out and named; a light without a position counts
- * for the sky alone, from the middle of the site (or the reference point where no outline is known), and is named.
+ * for the sky alone, from the middle of the site (or the reference point where no outline is known), and is named. A
+ * light that is not the same all round and has no bearing faces true north and is named: to turn it toward each place in
+ * turn would be a different proposal for each of them.
  */
 public final class SceneDrawing {
 
@@ -59,6 +59,7 @@ public final class SceneDrawing {
     private final List<Lamp> present = new ArrayList<>();
     private final List<String> leftOut = new ArrayList<>();
     private final List<String> unplaced = new ArrayList<>();
+    private final List<String> unaimed = new ArrayList<>();
     private final Map<String, Map<Property, Known>> known = new HashMap<>();
 
     /** Before the curfew or after it: which of a type's outputs counts. */
@@ -91,8 +92,9 @@ public final class SceneDrawing {
      * @param scene    to be assessed; without ranges
      * @param leftOut  marks of types that could not be reckoned with, so that sums are "at least"
      * @param unplaced marks of types some of whose lights have no position
+     * @param unaimed  marks of types some of whose lights face nobody knows where, although it matters
      */
-    public record Drawn(OpenScene scene, List<String> leftOut, List<String> unplaced) {}
+    public record Drawn(OpenScene scene, List<String> leftOut, List<String> unplaced, List<String> unaimed) {}
 
     /** The scene of one scheme in one period of the night, in the air the project states. */
     public static Drawn of(Project project, Scheme scheme, Period period) {
@@ -109,7 +111,11 @@ public final class SceneDrawing {
                 drawing.surroundings(air),
                 Optional.of(drawing.present()),
                 drawing.boundary());
-        return new Drawn(drawing.open(scene), List.copyOf(drawing.leftOut), List.copyOf(drawing.unplaced));
+        return new Drawn(
+                drawing.open(scene),
+                List.copyOf(drawing.leftOut),
+                List.copyOf(drawing.unplaced),
+                List.copyOf(drawing.unaimed));
     }
 
     private OpenScene open(Scene scene) {
@@ -194,38 +200,24 @@ public final class SceneDrawing {
     }
 
     private Drawing drawn(LuminaireType type, String mark, List<Placement> lights) {
-        Optional<Reading> lumens = lumens(type.values());
+        TypeLight light = TypeLight.of(type.values());
         OptionalDouble stated = number(Subject.TYPE, "count", type.values());
-        if (lumens.isEmpty() || (stated.isEmpty() && lights.isEmpty())) {
+        if (light.lumens().isEmpty() || (stated.isEmpty() && lights.isEmpty())) {
             leftOut.add(mark);
             return Drawing.NOTHING;
         }
-        LampType drawn = new LampType(mark, type.values(), lumens.get());
-        known.put(mark, drawn.states());
+        LampType lamp = new LampType(mark, type.values(), light, light.lumens().get());
         int count = (int) stated.orElse(lights.size());
-        if (count <= lights.size()) {
-            return new Drawing(lights.stream().map(drawn::hung).toList(), List.of());
+        List<Lamp> placed = lights.stream().map(lamp::hung).toList();
+        List<Lamp> rest = count > placed.size() ? List.of(lamp.atCentre(count - placed.size())) : List.of();
+        if (!rest.isEmpty()) {
+            unplaced.add(mark);
         }
-        unplaced.add(mark);
-        return new Drawing(
-                lights.stream().map(drawn::hung).toList(), List.of(drawn.atCentre(count - lights.size())));
-    }
-
-    /** Lumens as stated, or watts times an efficacy. */
-    private static Optional<Reading> lumens(Values values) {
-        Optional<Reading> stated = Reading.of(Subject.TYPE, "lumens", values);
-        if (stated.isPresent()) {
-            return stated;
+        if (lamp.lacksBearing) {
+            unaimed.add(mark);
         }
-        Optional<Reading> watts = Reading.of(Subject.TYPE, "watts", values);
-        Optional<Reading> efficacy = Reading.of(Subject.TYPE, "efficacy", values);
-        if (watts.isEmpty() || efficacy.isEmpty()) {
-            return Optional.empty();
-        }
-        double lumens = watts.get().number() * efficacy.get().number();
-        return Optional.of(new Reading(
-                Double.toString(lumens),
-                Known.assumed("watts times " + efficacy.get().text() + " lm/W: low confidence")));
+        known.put(mark, lamp.states());
+        return new Drawing(placed, rest);
     }
 
     /** What all lights of one type have in common. */
@@ -233,18 +225,17 @@ public final class SceneDrawing {
 
         private final String mark;
         private final Values values;
-        private final Reading lumens;
-        private final Reading shapeId;
+        private final TypeLight light;
+        private final TypeLight.Amount lumens;
         private final Reading spectralClass;
-        private final Shape shape;
+        private boolean lacksBearing;
 
-        LampType(String mark, Values values, Reading lumens) {
+        LampType(String mark, Values values, TypeLight light, TypeLight.Amount lumens) {
             this.mark = mark;
             this.values = values;
+            this.light = light;
             this.lumens = lumens;
-            this.shapeId = required("shape");
             this.spectralClass = required("spectralClass");
-            this.shape = Shapes.byId(shapeId.text()).orElseThrow();
         }
 
         private Reading required(String field) {
@@ -254,22 +245,23 @@ public final class SceneDrawing {
         Map<Property, Known> states() {
             Map<Property, Known> states = new HashMap<>();
             states.put(Property.LUMENS, lumens.known());
-            states.put(Property.SHAPE, shapeId.known());
+            states.put(Property.SHAPE, light.shapeKnown());
             states.put(Property.SPECTRUM, spectralClass.known());
-            states.put(Property.TILT, required("tilt").known());
+            states.put(Property.TILT, light.tiltKnown());
+            states.put(Property.BEARING, light.bearingKnown(lacksBearing));
             states.put(Property.MOUNTING_HEIGHT, required("mountingHeight").known());
             states.put(Property.COUNT, Known.workedOut("the lights of the plan"));
             return states;
         }
 
-        Lamp hung(Placement light) {
+        Lamp hung(Placement placed) {
             double ground =
-                    number(Subject.LIGHT, "groundHeight", light.values()).orElse(siteGroundM());
+                    number(Subject.LIGHT, "groundHeight", placed.values()).orElse(siteGroundM());
             Position at = new Position(
-                    number(Subject.LIGHT, "east", light.values()).orElse(0),
-                    number(Subject.LIGHT, "north", light.values()).orElse(0),
-                    ground - baseM + own(light, "mountingHeight"));
-            return lamp(light.mark(), 1, at, ground - baseM, attitude(light.values()));
+                    number(Subject.LIGHT, "east", placed.values()).orElse(0),
+                    number(Subject.LIGHT, "north", placed.values()).orElse(0),
+                    ground - baseM + own(placed, "mountingHeight"));
+            return lamp(placed.mark(), 1, at, ground - baseM, placed.values());
         }
 
         Lamp atCentre(int count) {
@@ -280,17 +272,7 @@ public final class SceneDrawing {
                     centre.eastM(),
                     centre.northM(),
                     ground + required("mountingHeight").number());
-            return lamp(mark + "-unplaced", count, at, ground, attitude(Values.NONE));
-        }
-
-        private Attitude attitude(Values own) {
-            double bearing = number(Subject.LIGHT, "bearing", own)
-                    .orElse(number(Subject.TYPE, "bearing", values).orElse(0));
-            double tilt =
-                    number(Subject.LIGHT, "tilt", own).orElse(required("tilt").number());
-            double roll =
-                    number(Subject.LIGHT, "roll", own).orElse(required("roll").number());
-            return new Attitude(bearing, tilt, roll);
+            return lamp(mark + "-unplaced", count, at, ground, Values.NONE);
         }
 
         private double output() {
@@ -298,25 +280,28 @@ public final class SceneDrawing {
                     .number();
         }
 
-        private double own(Placement light, String field) {
-            return number(Subject.LIGHT, field, light.values())
+        private double own(Placement placed, String field) {
+            return number(Subject.LIGHT, field, placed.values())
                     .orElse(required(field).number());
         }
 
-        private Lamp lamp(String lampMark, int count, Position at, double groundM, Attitude attitude) {
-            double size = number(Subject.TYPE, "luminousSize", values).orElse(shape.luminousSizeM());
+        private Lamp lamp(String lampMark, int count, Position at, double groundM, Values own) {
+            lacksBearing |= light.lacksBearing(own);
+            FittedShape shape = light.shape();
+            double size = number(Subject.TYPE, "luminousSize", values)
+                    .orElse(shape.shape().luminousSizeM());
             return new Lamp(
                     lampMark,
                     mark,
                     count,
                     at,
                     groundM,
-                    attitude,
-                    new LuminousFlux(lumens.number() * output() / 100),
-                    shape.distribution(),
+                    light.hang(own),
+                    new LuminousFlux(lumens.value() * output() / 100),
+                    shape.light(),
                     SpectralClasses.byId(spectralClass.text()).orElseThrow().spectrum(),
                     size,
-                    shape.nearestM());
+                    shape.nearestM(size));
         }
     }
 

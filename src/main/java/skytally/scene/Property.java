@@ -7,6 +7,7 @@ public enum Property {
     SPECTRUM,
     SHAPE,
     TILT,
+    BEARING,
     MOUNTING_HEIGHT,
     EYE_HEIGHT,
     DISTANCE,

@@ -6,6 +6,7 @@ import java.util.LinkedHashMap;
 import java.util.List;
 import java.util.Map;
 import java.util.Optional;
+import java.util.stream.Collectors;
 
 /**
  * The spectral classes, read once from {@code spectra/classes}: one file a class, and one line in {@code index.txt}.
@@ -31,6 +32,15 @@ public final class SpectralClasses {
     /** The classes a lamp can have, in the order of the index. */
     public static List<SpectralClass> lamps() {
         return CLASSES.values().stream().filter(each -> !each.isReference()).toList();
+    }
+
+    /** Where the spectrum of a class is from, as the head of its file says it under its name and over its columns. */
+    public static String origin(String id) {
+        List<String> remarks = Table.read(FOLDER + id + ".csv").remarks();
+        return remarks.stream()
+                .skip(1)
+                .takeWhile(remark -> !remark.startsWith("power ="))
+                .collect(Collectors.joining(" "));
     }
 
     /** The natural moonless sky: airglow lines and continuum, and Sun-like light. */

@@ -10,7 +10,7 @@ import java.util.ArrayList;
 import java.util.List;
 
 /** A text table among our resources: comment lines begin with {@code #}, blank lines do not count. */
-record Table(String name, List<Row> rows) {
+record Table(String name, List<Row> rows, List<String> remarks) {
 
     /** One line, and where it stands, counted from 1 as an editor does. */
     record Row(String table, int line, String text) {
@@ -42,18 +42,21 @@ record Table(String name, List<Row> rows) {
             throw new IllegalStateException(name + " is missing");
         }
         List<Row> rows = new ArrayList<>();
+        List<String> remarks = new ArrayList<>();
         try (BufferedReader lines = new BufferedReader(new InputStreamReader(resource, StandardCharsets.UTF_8))) {
             int number = 0;
             for (String line = lines.readLine(); line != null; line = lines.readLine()) {
                 number++;
-                if (!line.isBlank() && !line.startsWith("#")) {
+                if (line.startsWith("#")) {
+                    remarks.add(line.substring(1).strip());
+                } else if (!line.isBlank()) {
                     rows.add(new Row(name, number, line.strip()));
                 }
             }
         } catch (IOException e) {
             throw new UncheckedIOException(e);
         }
-        return new Table(name, List.copyOf(rows));
+        return new Table(name, List.copyOf(rows), List.copyOf(remarks));
     }
 
     /** The column headings: the first row that counts. */

@@ -10,7 +10,8 @@ import org.springframework.web.bind.annotation.ModelAttribute;
 class PageAdvice {
 
     /** The pages that exist, in the order the head of each page names them. A new page is one line here. */
-    private static final List<Room> ROOMS = List.of(new Room("first-look", "/"), new Room("projects", "/projects"));
+    private static final List<Room> ROOMS =
+            List.of(new Room("first-look", "/"), new Room("projects", "/projects"), new Room("guide", "/guide"));
 
     /**
      * A page the head of every page leads to.

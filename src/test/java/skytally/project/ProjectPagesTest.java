@@ -102,7 +102,7 @@ class ProjectPagesTest {
     void sayWhatStandsInForWhatIsNotKnown() throws Exception {
         assertThat(pages.get(at + "/lights/proposed/types/A2").words())
                 .contains("not known 6 m stands in, 5 to 8: A usual column; common practice, no source.");
-        assertThat(pages.get(at + "/lights").words()).contains("6 m stands in not known", "0 of 10");
+        assertThat(pages.get(at + "/lights").words()).contains("6 m stands in not known", "0 of 11");
         assertThat(pages.get(at + "/site").words()).contains("Nothing stands in for it.");
     }
 

@@ -5,6 +5,8 @@ import java.util.List;
 import org.springframework.stereotype.Component;
 import skytally.luminaire.Shape;
 import skytally.luminaire.Shapes;
+import skytally.notation.NumberReader;
+import skytally.notation.QuantityFormat;
 import skytally.project.Claim;
 import skytally.project.Field;
 import skytally.project.Project;
@@ -71,11 +73,21 @@ public class ValueWords {
                 .orElse("");
     }
 
-    /** A value as it stands in a table. */
+    /** A value as it stands in a table: a number is grouped as this house writes numbers, however it was typed. */
     public Cell cell(String label, Field field, Stated stated) {
         Claim inUse = stated.inUse();
-        String written = inUse.state() == State.NOT_KNOWN ? standInBriefly(field) : value(field, inUse);
+        String written = inUse.state() == State.NOT_KNOWN ? standInBriefly(field) : inTable(field, inUse);
         return new Cell(label, written.isEmpty() ? "–" : written, inUse.state(), false);
+    }
+
+    private String inTable(Field field, Claim claim) {
+        if (field.kind().isNumber()
+                && NumberReader.read(claim.value(), field.kind() == Field.Kind.WHOLE)
+                        instanceof NumberReader.Number number) {
+            String unit = claim.unit().isEmpty() ? field.firstUnit() : claim.unit();
+            return amount(field, QuantityFormat.asTyped(number.value()).plain(), unit);
+        }
+        return value(field, claim);
     }
 
     /** Where a claim comes from. */

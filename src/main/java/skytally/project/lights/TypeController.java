@@ -2,6 +2,8 @@ package skytally.project.lights;
 
 import jakarta.servlet.http.HttpServletRequest;
 import jakarta.servlet.http.HttpServletResponse;
+import java.time.Clock;
+import java.time.LocalDate;
 import java.util.List;
 import java.util.Set;
 import java.util.UUID;
@@ -19,6 +21,8 @@ import skytally.project.KeptProject;
 import skytally.project.LuminaireType;
 import skytally.project.Placement;
 import skytally.project.Scheme;
+import skytally.project.ShapeFromWords;
+import skytally.project.Values;
 import skytally.project.entry.Heading;
 import skytally.project.entry.ProjectDesk;
 import skytally.project.entry.Reading;
@@ -26,6 +30,7 @@ import skytally.project.entry.Typed;
 import skytally.project.entry.ValuesEditor;
 import skytally.project.entry.ValuesForm;
 import skytally.project.entry.WhoCookie;
+import skytally.project.entry.Words;
 
 /** One type of the schedule: its values, its mark, and its removal. */
 @Controller
@@ -37,10 +42,13 @@ class TypeController {
 
     private final ProjectDesk desk;
     private final ValuesEditor editor;
+    private final Words words;
+    private final Clock clock = Clock.systemDefaultZone();
 
-    TypeController(ProjectDesk desk, ValuesEditor editor) {
+    TypeController(ProjectDesk desk, ValuesEditor editor, Words words) {
         this.desk = desk;
         this.editor = editor;
+        this.words = words;
     }
 
     @GetMapping
@@ -75,7 +83,9 @@ class TypeController {
         if (!reading.isValid()) {
             return with(desk.refusal(PAGE, kept), scheme, type, reading.form(), mark);
         }
-        LuminaireType changed = new LuminaireType(mark, reading.values());
+        Values values = ShapeFromWords.added(
+                type.values(), reading.values(), LocalDate.now(clock).toString());
+        LuminaireType changed = new LuminaireType(mark, values);
         desk.save(
                 kept,
                 kept.project().withScheme(scheme.with(replaced(scheme, type, changed), scheme.placements())),
@@ -84,7 +94,8 @@ class TypeController {
                 mark,
                 scheme.name());
         WhoCookie.keep(response, heading.who());
-        return desk.on(kept, "saved", heading, "lights", scheme.mark(), "types", mark);
+        String done = values.equals(reading.values()) ? "saved" : "saved-shape";
+        return desk.on(kept, done, heading, "lights", scheme.mark(), "types", mark);
     }
 
     @PostMapping(params = "doing=rename")
@@ -156,12 +167,13 @@ class TypeController {
                 .toList();
     }
 
-    private static ModelAndView with(
-            ModelAndView page, Scheme scheme, LuminaireType type, ValuesForm form, String mark) {
+    private ModelAndView with(ModelAndView page, Scheme scheme, LuminaireType type, ValuesForm form, String mark) {
         return page.addObject("form", form)
                 .addObject("scheme", scheme)
                 .addObject("type", type)
                 .addObject("mark", mark)
+                .addObject("groups", TypeGroup.of(form.rows()))
+                .addObject("hang", TypeHang.of(type, scheme.placementsOf(type.mark()), words))
                 .addObject("placed", scheme.placementsOf(type.mark()).size())
                 .addObject("said", type.values().byField().size())
                 .addObject("tally", Schedule.tally(List.of(type.values())));

@@ -11,6 +11,7 @@ import org.apache.commons.csv.CSVRecord;
 import skytally.project.Claim;
 import skytally.project.LuminaireType;
 import skytally.project.Party;
+import skytally.project.ShapeFromWords;
 import skytally.project.Source;
 import skytally.project.Stated;
 import skytally.project.Values;
@@ -144,11 +145,10 @@ final class TypeClaims {
 
     private void readKind() {
         String words = row.get("shape_words");
-        if (!words.startsWith("removed")) {
-            ShapeWords.Choice choice =
-                    ShapeWords.of(words, Double.parseDouble(row.get("tilt")), Double.parseDouble(row.get("ulr")));
-            put("shape", assumed(choice.shape(), "", "", "", choice.why()));
-        }
+        put(
+                "shape",
+                ShapeFromWords.of(words)
+                        .orElseThrow(() -> new IllegalArgumentException("No shape answers to “" + words + "”")));
         readSpectralClass();
     }
 
