@@ -89,8 +89,8 @@ public final class Assessor {
                 figures.put(figure.key(), figure);
             }
             Map<String, Position> eyes = new LinkedHashMap<>();
-            likely.forEach(place ->
-                    eyes.put(place.observer().mark(), place.observer().eye()));
+            likely.forEach(
+                    place -> eyes.put(place.observer().mark(), place.observer().eye()));
             return new Assessment(
                     circumstance,
                     figures,

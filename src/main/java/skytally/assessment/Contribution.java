@@ -14,7 +14,12 @@ import skytally.scene.Look;
  * @param skyCdM2       sky glow, photopic, by the id of the direction looked in
  */
 public record Contribution(
-        String place, String type, double illuminanceLx, double windowLx, double veilCdM2, Map<String, Double> skyCdM2) {
+        String place,
+        String type,
+        double illuminanceLx,
+        double windowLx,
+        double veilCdM2,
+        Map<String, Double> skyCdM2) {
 
     public Contribution {
         skyCdM2 = Map.copyOf(skyCdM2);

@@ -1,24 +1,13 @@
 package skytally.assessment;
 
-import java.util.ArrayList;
-import java.util.Arrays;
 import java.util.List;
+import java.util.function.ToDoubleFunction;
 import skytally.atmosphere.AirMass;
-import skytally.citation.Bibliography;
-import skytally.citation.Citation;
-import skytally.eye.PointVisibility;
-import skytally.glare.VeilingLuminance;
-import skytally.naturalsky.NaturalBackground;
-import skytally.notation.QuantityFormat;
-import skytally.photometry.SurfaceBrightness;
-import skytally.scene.Known;
 import skytally.geometry.Direction;
 import skytally.geometry.Position;
-import java.util.function.ToDoubleFunction;
+import skytally.scene.Known;
 import skytally.scene.OpenScene;
 import skytally.scene.Property;
-import skytally.spectrum.SpectralClasses;
-
 
 /** How the light that reaches a place in a straight line was worked out. */
 final class DirectWorkings extends Shown {
@@ -148,7 +137,8 @@ final class DirectWorkings extends Shown {
         long types = numbers.contributions().stream()
                 .filter(type -> of.applyAsDouble(type) > 0)
                 .count();
-        return name + " = " + (types == 0 ? "" : part + " of " + types + (types == 1 ? " type" : " types") + ", added = ")
+        return name + " = "
+                + (types == 0 ? "" : part + " of " + types + (types == 1 ? " type" : " types") + ", added = ")
                 + result(measure);
     }
 
@@ -186,9 +176,7 @@ final class DirectWorkings extends Shown {
                                 result(Measure.DISTANCE),
                                 "heights and distance")),
                 cite("inverse-square", "cie-150-planes"),
-                List.of(
-                        "Outside of the glass, on an upright plane facing the lights.",
-                        WITHOUT_AIR));
+                List.of("Outside of the glass, on an upright plane facing the lights.", WITHOUT_AIR));
     }
 
     private Working windowOfMany() {
@@ -198,7 +186,8 @@ final class DirectWorkings extends Shown {
                 byType("E_v", " lx", Contribution::windowLx),
                 cite("inverse-square", "cie-150-planes"),
                 List.of(
-                        "Outside of the glass, on an upright plane that faces " + facing() + ". Lamps behind it add nothing.",
+                        "Outside of the glass, on an upright plane that faces " + facing()
+                                + ". Lamps behind it add nothing.",
                         WITHOUT_AIR));
     }
 
@@ -213,10 +202,16 @@ final class DirectWorkings extends Shown {
                 "E_v(β) = Σ N · I(γ) · cos a · max(0, cos(β − β_lamp)) / d²,   the greatest of 360 bearings β",
                 "E_v(" + result(Measure.WORST_PLANE_FACING) + ") = " + result(Measure.WORST_PLANE),
                 List.of(
-                        worked("Bearing of the plane", "β", result(Measure.WORST_PLANE_FACING), "a search by whole degrees"),
+                        worked(
+                                "Bearing of the plane",
+                                "β",
+                                result(Measure.WORST_PLANE_FACING),
+                                "a search by whole degrees"),
                         worked("Light at the eye", "E", result(Measure.ILLUMINANCE), "its own working")),
                 cite("inverse-square", "cie-150-planes"),
-                List.of("An upright plane turned to whichever bearing makes the sum over all lamps greatest.", WITHOUT_AIR));
+                List.of(
+                        "An upright plane turned to whichever bearing makes the sum over all lamps greatest.",
+                        WITHOUT_AIR));
     }
 
     Working worstPlaneFacing() {
@@ -231,8 +226,8 @@ final class DirectWorkings extends Shown {
     Working level() {
         return new Working(
                 "E_h = Σ N · I(γ) · max(0, sin a) / d²,   a the lamp's height above the level",
-                "E_h = " + result(Measure.LEVEL_ILLUMINANCE) + " over " + numbers.scene().lamps().size()
-                        + (isOnePoint() ? " position" : " positions"),
+                "E_h = " + result(Measure.LEVEL_ILLUMINANCE) + " over "
+                        + numbers.scene().lamps().size() + (isOnePoint() ? " position" : " positions"),
                 List.of(worked("Height of the eye", "h₂", m(eyeHeight()), "the place's height")),
                 cite("inverse-square", "cie-150-planes"),
                 List.of("On a level plane at the height of the eye, facing up.", WITHOUT_AIR));

@@ -44,12 +44,7 @@ final class GatheredLights {
 
     /** Lamps that send the same way: their lumens, and those the ground under them gets. */
     private record Bundle(
-            int strand,
-            IntensityDistribution light,
-            Attitude attitude,
-            Rotation hang,
-            double lumens,
-            double onGround) {
+            int strand, IntensityDistribution light, Attitude attitude, Rotation hang, double lumens, double onGround) {
 
         private record Key(int strand, IntensityDistribution light, Attitude attitude) {}
 
@@ -83,12 +78,7 @@ final class GatheredLights {
      * @param onGround      lumens of each that fall on the ground
      */
     record Light(
-            Position at,
-            Emissions emissions,
-            Emissions ground,
-            int[] strands,
-            double[] lumens,
-            double[] onGround) {}
+            Position at, Emissions emissions, Emissions ground, int[] strands, double[] lumens, double[] onGround) {}
 
     GatheredLights(List<Lamp> lamps) {
         Map<Strand, Integer> index = new LinkedHashMap<>();
@@ -109,8 +99,7 @@ final class GatheredLights {
         Attitude attitude = plain(lamp);
         double down = downward.computeIfAbsent(
                 new Bundle.Key(strand, lamp.light(), attitude), key -> FluxShare.downward(lamp.light(), attitude));
-        Bundle bundle = new Bundle(
-                strand, lamp.light(), attitude, attitude.rotation(), lumens, lumens * down);
+        Bundle bundle = new Bundle(strand, lamp.light(), attitude, attitude.rotation(), lumens, lumens * down);
         return new Node(lamp.position(), lamp.groundHeightM(), 0, List.of(bundle), List.of());
     }
 
@@ -156,7 +145,8 @@ final class GatheredLights {
 
     private static Comparator<Node> alongTheLongerSide(List<Node> nodes) {
         Comparator<Node> east = Comparator.comparingDouble(node -> node.middle().eastM());
-        Comparator<Node> north = Comparator.comparingDouble(node -> node.middle().northM());
+        Comparator<Node> north =
+                Comparator.comparingDouble(node -> node.middle().northM());
         return spread(nodes, true) >= spread(nodes, false) ? east : north;
     }
 
@@ -227,16 +217,11 @@ final class GatheredLights {
 
     /** A light in view lights the air on all sides of the line of sight; one out of view only what lies above it. */
     private static Light light(Node node, Position eye, double distance) {
-        DirectPath path =
-                DirectPath.between(node.middle().heightM(), eye.heightM(), Math.max(1e-6, distance));
+        DirectPath path = DirectPath.between(node.middle().heightM(), eye.heightM(), Math.max(1e-6, distance));
         Rotation frame = LampEmission.frame(node.middle().bearingTo(eye));
         List<LampEmission> emissions = node.bundles().stream()
                 .map(bundle -> new LampEmission(
-                        bundle.light(),
-                        bundle.hang(),
-                        node.middle().heightM(),
-                        frame,
-                        !path.clearsTheHorizon()))
+                        bundle.light(), bundle.hang(), node.middle().heightM(), frame, !path.clearsTheHorizon()))
                 .toList();
         return new Light(
                 node.middle(),

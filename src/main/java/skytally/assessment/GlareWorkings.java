@@ -1,22 +1,11 @@
 package skytally.assessment;
 
 import java.util.ArrayList;
-import java.util.Arrays;
 import java.util.List;
-import skytally.atmosphere.AirMass;
-import skytally.citation.Bibliography;
-import skytally.citation.Citation;
-import skytally.eye.PointVisibility;
 import skytally.glare.VeilingLuminance;
-import skytally.naturalsky.NaturalBackground;
-import skytally.notation.QuantityFormat;
-import skytally.photometry.SurfaceBrightness;
-import skytally.scene.Known;
-import skytally.scene.Lamp;
 import skytally.scene.OpenScene;
 import skytally.scene.Property;
 import skytally.spectrum.SpectralClasses;
-
 
 /** How the veil in the eye beside the lights was worked out. */
 final class GlareWorkings extends Shown {
@@ -67,8 +56,8 @@ final class GlareWorkings extends Shown {
         inputs.add(constant("Pigment of the eye", "p", "0.5 (brown)"));
         return new Working(
                 "L_v = Σ E · f(θ),   f(θ) = 10/θ³ + (5/θ² + 0.1 p/θ) [1 + (A/62.5)⁴] + 0.0025 p",
-                "L_v = " + result(Measure.VEIL, look) + " over " + numbers.scene().lamps().size()
-                        + " positions, each with its own angle θ",
+                "L_v = " + result(Measure.VEIL, look) + " over "
+                        + numbers.scene().lamps().size() + " positions, each with its own angle θ",
                 inputs,
                 List.of(PlaceNumbers.VEIL.citation()),
                 veilNotes());
@@ -86,9 +75,10 @@ final class GlareWorkings extends Shown {
     Working roadVeil(int look) {
         return new Working(
                 "L_v = Σ 10 E cos θ / θ²   for 1.5° ≤ θ ≤ 60°",
-                "L_v = " + result(Measure.ROAD_VEIL, look) + " over " + numbers.scene().lamps().size()
-                        + (isOnePoint() ? " position" : " positions"),
-                List.of(worked("Direction looked in", "θ", "1° below the level, along the road", "the direction of travel")),
+                "L_v = " + result(Measure.ROAD_VEIL, look) + " over "
+                        + numbers.scene().lamps().size() + (isOnePoint() ? " position" : " positions"),
+                List.of(worked(
+                        "Direction looked in", "θ", "1° below the level, along the road", "the direction of travel")),
                 List.of(PlaceNumbers.ROAD_VEIL.citation()),
                 List.of(
                         "Initial output, nothing taken by the air, no roof of a car in the way: as limits for areas count it.",

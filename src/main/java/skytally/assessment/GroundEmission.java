@@ -18,4 +18,5 @@ record GroundEmission(double heightM) implements Emission {
     @Override
     public List<Cone> edges() {
         return List.of();
-    }}
+    }
+}

@@ -14,11 +14,7 @@ enum Measure {
     ONE_ILLUMINANCE(null, "direct/one-lamp-illuminance", "Light at the eye from the brightest single lamp", Unit.LUX),
     ILLUMINANCE(null, "direct/illuminance", "Light at the eye from all lamps together", Unit.LUX),
     WINDOW_ILLUMINANCE(null, "direct/window-illuminance", "Light on the window, outside of the glass", Unit.LUX),
-    WORST_PLANE(
-            null,
-            "direct/worst-plane-illuminance",
-            "Light on the upright plane that gets most",
-            Unit.LUX),
+    WORST_PLANE(null, "direct/worst-plane-illuminance", "Light on the upright plane that gets most", Unit.LUX),
     WORST_PLANE_FACING(null, "direct/worst-plane-facing", "Bearing that plane faces", Unit.DEGREE),
     LEVEL_ILLUMINANCE(null, "direct/level-illuminance", "Light on a level plane there, facing up", Unit.LUX),
     WINDOW_WORST(null, "direct/window-worst-illuminance", "Light on the brightest point of the window", Unit.LUX),
@@ -72,8 +68,7 @@ enum Measure {
     LIMIT_PRESENT(Look.Purpose.SKY, "eye/limit-present", "Faintest star under the sky as it is", Unit.MAGNITUDE),
     LIMIT(Look.Purpose.SKY, "eye/limit", "Faintest star with the lights", Unit.MAGNITUDE),
     STARS_NATURAL(Look.Purpose.SKY, "eye/stars-natural", "Stars above the horizon under the natural sky", Unit.STARS),
-    STARS_PRESENT(
-            Look.Purpose.SKY, "eye/stars-present", "Stars above the horizon under the sky as it is", Unit.STARS),
+    STARS_PRESENT(Look.Purpose.SKY, "eye/stars-present", "Stars above the horizon under the sky as it is", Unit.STARS),
     STARS(Look.Purpose.SKY, "eye/stars", "Stars above the horizon with the lights", Unit.STARS);
 
     private final Look.@Nullable Purpose purpose;

@@ -34,7 +34,8 @@ record PropertyLine(List<Position> corners) {
         }
         return points().parallelStream()
                 .map(eye -> new Found(eye, light.brightestPlane(facing(eye, 0))))
-                .reduce((one, other) -> other.plane().illuminanceLx() > one.plane().illuminanceLx() ? other : one)
+                .reduce((one, other) ->
+                        other.plane().illuminanceLx() > one.plane().illuminanceLx() ? other : one)
                 .map(found -> facing(found.eye(), found.plane().facingDeg()));
     }
 

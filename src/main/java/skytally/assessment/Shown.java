@@ -1,24 +1,17 @@
 package skytally.assessment;
 
 import java.util.ArrayList;
-import java.util.Comparator;
-import java.util.function.ToDoubleFunction;
 import java.util.Arrays;
+import java.util.Comparator;
 import java.util.List;
-import skytally.atmosphere.AirMass;
+import java.util.function.ToDoubleFunction;
 import skytally.citation.Bibliography;
 import skytally.citation.Citation;
-import skytally.eye.PointVisibility;
-import skytally.glare.VeilingLuminance;
-import skytally.naturalsky.NaturalBackground;
 import skytally.notation.QuantityFormat;
-import skytally.photometry.SurfaceBrightness;
 import skytally.scene.Known;
 import skytally.scene.Lamp;
 import skytally.scene.OpenScene;
 import skytally.scene.Property;
-import skytally.spectrum.SpectralClasses;
-
 
 /** What every working of a place says alike: inputs with their states, sources, numbers to five figures. */
 abstract class Shown {
@@ -59,10 +52,7 @@ abstract class Shown {
         if (types.size() > MOST_TYPES) {
             double rest = types.stream().skip(MOST_TYPES).mapToDouble(part).sum();
             inputs.add(worked(
-                    "All other types",
-                    symbol + "(rest)",
-                    written(rest, unit),
-                    types.size() - MOST_TYPES + " types"));
+                    "All other types", symbol + "(rest)", written(rest, unit), types.size() - MOST_TYPES + " types"));
         }
 
         return inputs;
@@ -73,7 +63,9 @@ abstract class Shown {
                 .filter(one -> one.type().equals(type))
                 .mapToInt(Lamp::count)
                 .sum();
-        return count == 1 ? "1 light, with its own distance and angle" : count + " lights, each with its own distance and angle";
+        return count == 1
+                ? "1 light, with its own distance and angle"
+                : count + " lights, each with its own distance and angle";
     }
 
     /** What goes into the light that the air sends back. */

@@ -5,8 +5,8 @@ import java.util.List;
 import java.util.Map;
 import skytally.geometry.Position;
 import skytally.scene.Look;
-import skytally.skyglow.SingleScattering;
 import skytally.skyglow.Sightline;
+import skytally.skyglow.SingleScattering;
 
 /**
  * The light that the air sends into one line of sight, once scattered, from all lamps of a scene.

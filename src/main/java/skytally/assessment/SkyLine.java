@@ -35,8 +35,11 @@ public record SkyLine(
                 present.orElse(natural).likely() - with.likely(),
                 valued(assessment, place, look + "/sky/luminance")
                         .map(Figure::likely)
-                        .orElseGet(() -> assessment.figure(place, look + "/sky/natural").likely()
-                                + assessment.figure(place, look + "/sky/artificial").likely()),
+                        .orElseGet(() ->
+                                assessment.figure(place, look + "/sky/natural").likely()
+                                        + assessment
+                                                .figure(place, look + "/sky/artificial")
+                                                .likely()),
                 assessment.figure(place, look + "/sky/increase"),
                 valued(assessment, place, look + "/sky/increase-over-present"));
     }

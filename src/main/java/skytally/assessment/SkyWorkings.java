@@ -1,22 +1,10 @@
 package skytally.assessment;
 
 import java.util.ArrayList;
-import java.util.Arrays;
 import java.util.List;
-import skytally.atmosphere.AirMass;
-import skytally.citation.Bibliography;
-import skytally.citation.Citation;
-import skytally.eye.PointVisibility;
-import skytally.glare.VeilingLuminance;
 import skytally.naturalsky.NaturalBackground;
-import skytally.notation.QuantityFormat;
 import skytally.photometry.SurfaceBrightness;
-import skytally.scene.Known;
-import skytally.scene.Lamp;
 import skytally.scene.OpenScene;
-import skytally.scene.Property;
-import skytally.spectrum.SpectralClasses;
-
 
 /** How the sky in a direction was worked out. */
 final class SkyWorkings extends Shown {
@@ -46,8 +34,7 @@ final class SkyWorkings extends Shown {
         List<Working.Input> inputs = new ArrayList<>(skyInputs());
         if (!isOnePoint()) {
             String direction = numbers.looks().get(look).id();
-            inputs.addAll(byType(
-                    "L", " cd/m²", type -> type.skyCdM2().getOrDefault(direction, 0.0)));
+            inputs.addAll(byType("L", " cd/m²", type -> type.skyCdM2().getOrDefault(direction, 0.0)));
         }
         return inputs;
     }
@@ -128,7 +115,11 @@ final class SkyWorkings extends Shown {
                         "q",
                         written(numbers.otherLight(), ""),
                         "the reading overhead, less nature and the lamps entered as there now")
-                : worked("Other light of the present sky, in natural skies", "q", "0", "no reading of the sky is entered");
+                : worked(
+                        "Other light of the present sky, in natural skies",
+                        "q",
+                        "0",
+                        "no reading of the sky is entered");
     }
 
     Working presentBrightness(int look) {
@@ -213,7 +204,10 @@ final class SkyWorkings extends Shown {
                                 "scattering of each lamp's spectrum"),
                         otherLight()),
                 cite("falchi-2016", "single-scattering"),
-                List.of("Over the sky as it is; less than nothing where lamps are taken away.", FIRST_ORDER, OTHER_LIGHT));
+                List.of(
+                        "Over the sky as it is; less than nothing where lamps are taken away.",
+                        FIRST_ORDER,
+                        OTHER_LIGHT));
     }
 
     Working increase(int look) {

@@ -316,9 +316,7 @@ public final class SceneDrawing {
         Clearness clearness = chosen.orElseGet(() -> Clearness.byId(air.text()).orElseThrow());
         for (Place place : project.places()) {
             Map<Property, Known> states = known.computeIfAbsent(place.mark(), mark -> new HashMap<>());
-            states.put(
-                    Property.AIR,
-                    chosen.isPresent() ? Known.assumed("the air chosen for this page") : air.known());
+            states.put(Property.AIR, chosen.isPresent() ? Known.assumed("the air chosen for this page") : air.known());
             states.put(Property.GROUND, ground.known());
         }
         return new Surroundings(

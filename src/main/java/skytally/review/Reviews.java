@@ -10,23 +10,18 @@ import java.util.UUID;
 import org.springframework.stereotype.Component;
 import skytally.assessment.Assessment.Topic;
 import skytally.assessment.Assessor;
-import skytally.assessment.Scope;
-import skytally.assessment.Scope.Others;
 import skytally.assessment.Circumstance;
 import skytally.assessment.Circumstance.Cloud;
 import skytally.assessment.Circumstance.Moment;
+import skytally.assessment.Scope;
+import skytally.assessment.Scope.Others;
 import skytally.atmosphere.Clearness;
-import skytally.project.Claim;
 import skytally.project.KeptProject;
-import skytally.project.Party;
 import skytally.project.Project;
 import skytally.project.SceneDrawing;
 import skytally.project.SceneDrawing.Drawn;
 import skytally.project.Scheme;
-import skytally.project.Source;
-import skytally.project.Stated;
 import skytally.scene.Scene;
-import skytally.scene.State;
 
 /**
  * Has the schemes of projects assessed, and remembers the last: the same version of a project, scheme, hour and air

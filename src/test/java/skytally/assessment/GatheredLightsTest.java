@@ -45,8 +45,11 @@ class GatheredLightsTest {
     @Test
     void areFewerTheFartherTheyAre() {
         GatheredLights gathered = new GatheredLights(TOWN);
-        int near = gathered.seenFrom(new Position(0, 0, 1.6)).along(Direction.UP).size();
-        int far = gathered.seenFrom(new Position(5000, 0, 1.6)).along(Direction.UP).size();
+        int near =
+                gathered.seenFrom(new Position(0, 0, 1.6)).along(Direction.UP).size();
+        int far = gathered.seenFrom(new Position(5000, 0, 1.6))
+                .along(Direction.UP)
+                .size();
         int veryFar = gathered.seenFrom(new Position(80_000, 0, 1.6))
                 .along(Direction.UP)
                 .size();
@@ -63,7 +66,10 @@ class GatheredLightsTest {
                 .sum();
         assertThat(lumens)
                 .isCloseTo(
-                        TOWN.stream().mapToDouble(lamp -> lamp.allFlux().lumens()).sum(), within(1e-6));
+                        TOWN.stream()
+                                .mapToDouble(lamp -> lamp.allFlux().lumens())
+                                .sum(),
+                        within(1e-6));
     }
 
     @Test

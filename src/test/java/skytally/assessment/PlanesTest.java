@@ -153,8 +153,7 @@ class PlanesTest {
                 .isTrue();
         assertThat(new GroundLine(List.of(new GroundLine.Point(200, 1))).hides(lamp, eye))
                 .isFalse();
-        assertThat(new GroundLine(List.of(new GroundLine.Point(0, 90), new GroundLine.Point(400, 90)))
-                        .hides(lamp, eye))
+        assertThat(new GroundLine(List.of(new GroundLine.Point(0, 90), new GroundLine.Point(400, 90))).hides(lamp, eye))
                 .as("the ground under either is its own")
                 .isFalse();
     }

@@ -19,7 +19,8 @@ class SharesTest {
             all.add(new Contribution("here", "T" + i, lux[i], 0, 0, Map.of()));
         }
         all.add(new Contribution("elsewhere", "T0", 1000, 0, 0, Map.of()));
-        Assessment assessment = new Assessment(Circumstance.EARLY_CLEAR, Map.of(), Map.of(), all, Map.of(), List.of(), List.of());
+        Assessment assessment =
+                new Assessment(Circumstance.EARLY_CLEAR, Map.of(), Map.of(), all, Map.of(), List.of(), List.of());
         return Shares.of(assessment, "here", Contribution::illuminanceLx);
     }
 

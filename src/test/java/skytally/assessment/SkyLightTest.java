@@ -90,8 +90,8 @@ class SkyLightTest {
 
     @Test
     void darkGroundSendsNothingBack() {
-        SkyLight onlyLamp = new SceneLights(new Scene(
-                        TestScenes.town(3), List.of(HERE), new Surroundings(TestScenes.CLEAR, 0)))
+        SkyLight onlyLamp = new SceneLights(
+                        new Scene(TestScenes.town(3), List.of(HERE), new Surroundings(TestScenes.CLEAR, 0)))
                 .over(HERE.eye())
                 .along(ZENITH);
         assertThat(onlyLamp.groundCdM2()).isZero();

@@ -1,14 +1,11 @@
 package skytally.project.plan;
 
-
 import java.util.ArrayList;
 import java.util.List;
 import java.util.Map;
 import java.util.Objects;
 import java.util.Optional;
 import java.util.function.Function;
-
-
 import java.util.stream.Collectors;
 import java.util.stream.Stream;
 import org.jspecify.annotations.Nullable;
@@ -19,13 +16,12 @@ import skytally.charts.SitePlan.Point;
 import skytally.charts.SitePlan.Unit;
 import skytally.geometry.Position;
 import skytally.notation.QuantityFormat;
-
 import skytally.project.LuminaireType;
+import skytally.project.Outline;
 import skytally.project.Place;
 import skytally.project.Placement;
 import skytally.project.Project;
 import skytally.project.Scheme;
-import skytally.project.Outline;
 import skytally.project.Values;
 import skytally.project.entry.Amount;
 import skytally.project.entry.Spot;
@@ -109,8 +105,8 @@ record PlanPage(
 
     /** The lights of the scheme, and those that are there already and stay. */
     private static List<Hung> hung(Project project, Scheme scheme) {
-        Stream<Scheme> existing = project.schemes().stream()
-                .filter(one -> one.kind() == Scheme.Kind.EXISTING && !one.equals(scheme));
+        Stream<Scheme> existing =
+                project.schemes().stream().filter(one -> one.kind() == Scheme.Kind.EXISTING && !one.equals(scheme));
         return Stream.concat(Stream.of(scheme), existing)
                 .flatMap(one -> hung(one, !one.equals(scheme)))
                 .toList();
@@ -123,8 +119,7 @@ record PlanPage(
         return scheme.placements().stream()
                 .filter(light -> types.containsKey(light.type()))
                 .flatMap(light -> Spot.of(light.values()).stream()
-                        .map(spot -> new Hung(
-                                scheme, Objects.requireNonNull(types.get(light.type())), light, spot)));
+                        .map(spot -> new Hung(scheme, Objects.requireNonNull(types.get(light.type())), light, spot)));
     }
 
     private static List<Point> outline(Values site) {
@@ -137,8 +132,8 @@ record PlanPage(
             List<Point> outline, List<Hung> hung, List<Place> placed, Unit unit, Words words) {
         List<Light> lights = hung.stream().map(PlanPage::light).toList();
         List<SitePlan.Place> places = placed.stream().map(PlanPage::place).toList();
-        List<Point> site = Stream.concat(outline.stream(), lights.stream().map(Light::at))
-                .toList();
+        List<Point> site =
+                Stream.concat(outline.stream(), lights.stream().map(Light::at)).toList();
         if (site.isEmpty() && places.isEmpty()) {
             return List.of();
         }
@@ -159,8 +154,8 @@ record PlanPage(
         pictures.add(
                 picture("plan-site", new SitePlan(whole, unit, outline, lights, places, null), hung, shown, words));
         if (shown.size() < places.size()) {
-            Frame all = Frame.around(withReference(
-                    Stream.concat(near.stream(), places.stream().map(SitePlan.Place::at))));
+            Frame all = Frame.around(
+                    withReference(Stream.concat(near.stream(), places.stream().map(SitePlan.Place::at))));
             pictures.add(picture(
                     "plan-all", new SitePlan(all, unit, outline, List.of(), places, whole), hung, places, words));
         }
@@ -169,8 +164,7 @@ record PlanPage(
 
     private static Frame grown(Frame frame) {
         double beside = Math.max(
-                LEAST_BESIDE_M,
-                BESIDE * Math.max(frame.eastM() - frame.westM(), frame.northM() - frame.southM()));
+                LEAST_BESIDE_M, BESIDE * Math.max(frame.eastM() - frame.westM(), frame.northM() - frame.southM()));
         return new Frame(
                 frame.westM() - beside, frame.eastM() + beside, frame.southM() - beside, frame.northM() + beside);
     }
@@ -179,17 +173,11 @@ record PlanPage(
         return Stream.concat(points, Stream.of(new Point(0, 0))).toList();
     }
 
-    private static Picture picture(
-            String id, SitePlan plan, List<Hung> hung, List<SitePlan.Place> shown, Words words) {
+    private static Picture picture(String id, SitePlan plan, List<Hung> hung, List<SitePlan.Place> shown, Words words) {
         String name = words.say("plan." + id);
-        String says = words.say(
-                "plan." + id + ".says", hung.size(), shown.size(), plan.ringStep(), plan.blockLength());
+        String says = words.say("plan." + id + ".says", hung.size(), shown.size(), plan.ringStep(), plan.blockLength());
         return new Picture(
-                id,
-                name,
-                says,
-                plan.svg(id + "-wide", name, says, WIDE),
-                plan.svg(id + "-narrow", name, says, NARROW));
+                id, name, says, plan.svg(id + "-wide", name, says, WIDE), plan.svg(id + "-narrow", name, says, NARROW));
     }
 
     private static Light light(Hung hung) {
@@ -217,14 +205,18 @@ record PlanPage(
                         values.text("what"),
                         values.text("kind").isEmpty()
                                 ? ""
-                                : words.find("choice.kind." + values.text("kind")).orElse(values.text("kind")))
+                                : words.find("choice.kind." + values.text("kind"))
+                                        .orElse(values.text("kind")))
                 .filter(part -> !part.isEmpty())
                 .collect(Collectors.joining("; "));
         return row(place.mark(), what, Spot.of(values).orElseThrow(), unit, base + "/places/" + place.mark());
     }
 
     private static Row row(Hung hung, Unit unit, String base) {
-        String what = Stream.of(hung.type().mark(), hung.type().values().text("use"), hung.scheme().name())
+        String what = Stream.of(
+                        hung.type().mark(),
+                        hung.type().values().text("use"),
+                        hung.scheme().name())
                 .filter(part -> !part.isEmpty())
                 .collect(Collectors.joining(", "));
         return row(
@@ -232,7 +224,8 @@ record PlanPage(
                 what,
                 hung.spot(),
                 unit,
-                base + "/lights/" + hung.scheme().mark() + "/positions/" + hung.light().mark());
+                base + "/lights/" + hung.scheme().mark() + "/positions/"
+                        + hung.light().mark());
     }
 
     private static Row row(String mark, String what, Spot spot, Unit unit, String href) {

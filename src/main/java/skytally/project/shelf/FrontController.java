@@ -24,9 +24,9 @@ import skytally.project.KeptProject;
 import skytally.project.Project;
 import skytally.project.Projects;
 import skytally.project.Saving;
+import skytally.project.WholeProject;
 import skytally.project.entry.WhoCookie;
 import skytally.project.entry.Words;
-import skytally.project.WholeProject;
 import skytally.project.transfer.ProjectFile;
 import skytally.web.InvalidInputException.Fault;
 

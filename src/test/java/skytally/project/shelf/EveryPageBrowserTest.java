@@ -31,8 +31,7 @@ class EveryPageBrowserTest {
     private List<String> pages() {
         String project = "/projects/"
                 + projects.add(
-                                Copies.withFreshId(
-                                        Samples.byName("ferrin-lane").orElseThrow()),
+                                Copies.withFreshId(Samples.byName("ferrin-lane").orElseThrow()),
                                 Saving.by("", "A sample"))
                         .project()
                         .id();
@@ -81,7 +80,9 @@ class EveryPageBrowserTest {
         try (Browser browser = Browser.withoutScripts(port)) {
             for (String page : pages()) {
                 browser.open(page);
-                assertThat(browser.driver().findElements(By.tagName("h1"))).as(page).hasSize(1);
+                assertThat(browser.driver().findElements(By.tagName("h1")))
+                        .as(page)
+                        .hasSize(1);
                 assertThat(browser.driver().findElement(By.tagName("main")).getText())
                         .as(page)
                         .hasSizeGreaterThan(100);
