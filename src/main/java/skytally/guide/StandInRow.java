@@ -43,7 +43,7 @@ record StandInRow(String subject, String label, String likely, String low, Strin
 
     private static String written(Field field, String value, MessageSource messages) {
         return switch (field.kind()) {
-            case TEXT -> value;
+            case TEXT, NOTE, CLOCK, ZONE, CORNERS, SCHEDULE -> value;
             case CHOICE -> choice(field, value, messages);
             case NUMBER, WHOLE -> {
                 String digits = QuantityFormat.asTyped(new BigDecimal(value)).digits();

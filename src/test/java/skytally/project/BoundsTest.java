@@ -88,16 +88,23 @@ class BoundsTest {
         return Values.NONE.with("zoneReason", Stated.of(Claim.given(text, "", Source.reason("test"), Party.APPLICANT)));
     }
 
-    /** As many lights as fit, each placed as the page places it in a row, must fit into a file as well. */
+    /** As many lights as fit, each placed and turned as the page does it in a block, must fit into a file as well. */
     @Test
     void leaveRoomForAllLightsInAFile() throws Exception {
         Claim basis = Claim.given("0", "m", Source.document("D1", "plan, sheet 3"), Party.APPLICANT)
                 .typed("A. Planner", "2026-12-01");
         List<Placement> lights = many(20_000, i -> {
-            String how = "light " + i + " of a row of 20000 from 0 m east, 0 m north to 10000 m east, 0 m north";
+            String how =
+                    "light " + i % 200 + " of 200 in row " + i / 200 + " of 100 of a block from 0\u00a0m east, 0\u00a0m"
+                            + " north, 10\u00a0m apart on a bearing of 0°, the rows 10\u00a0m apart to its right";
             Stated east = Stated.of(ValuesEditor.workedOut(basis, String.valueOf(i / 2.0), "m", how));
             Stated north = Stated.of(ValuesEditor.workedOut(basis, "0", "m", how));
-            return new Placement("A1-" + i, "A1", Values.NONE.with("east", east).with("north", north));
+            Stated bearing = Stated.of(Claim.given("90", "°", Source.document("D1", "plan, sheet 3"), Party.APPLICANT)
+                    .typed("A. Planner", "2026-12-01"));
+            return new Placement(
+                    "A1-" + i,
+                    "A1",
+                    Values.NONE.with("east", east).with("north", north).with("bearing", bearing));
         });
         Project large = EMPTY.withScheme(schemeOf(List.of(new LuminaireType("A1", Values.NONE)), lights));
         byte[] written = ProjectFile.write(large);

@@ -67,7 +67,7 @@ public final class ProjectFile {
 
     private ProjectFile() {}
 
-    /** The canonical text of a project without the bytes of its files: UTF-8, two spaces a level, ending with a line end. */
+    /** The canonical text of a project without the bytes of its files: UTF-8, as {@link FileText} has it. */
     public static byte[] write(Project project) {
         return text(written(project));
     }
@@ -106,9 +106,7 @@ public final class ProjectFile {
 
     /** The text of a tree as files have it. */
     static byte[] text(ObjectNode tree) {
-        String text =
-                JSON.writerWithDefaultPrettyPrinter().writeValueAsString(tree).replace("\r\n", "\n");
-        return (text + "\n").getBytes(StandardCharsets.UTF_8);
+        return FileText.of(tree).getBytes(StandardCharsets.UTF_8);
     }
 
     static ObjectNode tree(Project project) {
