@@ -112,8 +112,7 @@ public final class SitePlan {
 
         /** How far the point of it that is nearest to the reference point lies. */
         double nearestM() {
-            return Math.hypot(
-                    Math.max(0, Math.max(westM, -eastM)), Math.max(0, Math.max(southM, -northM)));
+            return Math.hypot(Math.max(0, Math.max(westM, -eastM)), Math.max(0, Math.max(southM, -northM)));
         }
 
         /** How far the point of it that is farthest from the reference point lies. */
@@ -375,8 +374,9 @@ public final class SitePlan {
 
         /** One light for all that fall together and point the same way, in cells as small as the number allows. */
         private List<Light> gathered(boolean existing) {
-            List<Light> found =
-                    lights.stream().filter(light -> light.existing() == existing).toList();
+            List<Light> found = lights.stream()
+                    .filter(light -> light.existing() == existing)
+                    .toList();
             for (double cell = 1; ; cell *= 2) {
                 Map<List<Long>, Light> cells = new LinkedHashMap<>();
                 for (Light light : found) {
@@ -522,8 +522,7 @@ public final class SitePlan {
         }
 
         private void letter(String letter, double x, double y, String kind) {
-            svg.text(
-                    "text", letter, "x", x, "y", y, "font-size", 15, "text-anchor", "middle", "class", kind);
+            svg.text("text", letter, "x", x, "y", y, "font-size", 15, "text-anchor", "middle", "class", kind);
         }
 
         private static String at(double x, double y) {

@@ -35,9 +35,7 @@ public final class BareErrorPage extends ErrorReportValve {
     };
 
     private static String page(String title, String[] told, String theme) {
-        return String.format(
-                Locale.ROOT,
-                """
+        return String.format(Locale.ROOT, """
                 <!doctype html>
                 <html lang="en" data-theme="%s">
                 <head><meta charset="utf-8"><meta name="viewport" content="width=device-width, initial-scale=1">
@@ -57,13 +55,7 @@ public final class BareErrorPage extends ErrorReportValve {
                 </div>
                 </body>
                 </html>
-                """,
-                theme,
-                title,
-                title,
-                told[0],
-                told[1],
-                told[2]);
+                """, theme, title, title, told[0], told[1], told[2]);
     }
 
     private static String problem(int status, String title, String[] told) {

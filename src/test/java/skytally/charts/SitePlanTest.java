@@ -53,8 +53,8 @@ class SitePlanTest {
     }
 
     private static String path(String svg, String kind) {
-        Matcher found =
-                Pattern.compile("<path d=\"([^\"]*)\" class=\"[^\"]*" + kind + "\"").matcher(svg);
+        Matcher found = Pattern.compile("<path d=\"([^\"]*)\" class=\"[^\"]*" + kind + "\"")
+                .matcher(svg);
         assertThat(found.find()).as(kind).isTrue();
         return found.group(1);
     }

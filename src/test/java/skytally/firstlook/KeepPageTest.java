@@ -119,7 +119,8 @@ class KeepPageTest {
         assertThat(page).contains("href=\"#keep\"", "id=\"keep\"");
         String form = page.substring(page.indexOf("id=\"keep\""), page.indexOf("</form>", page.indexOf("id=\"keep\"")));
         List<String> sent = new ArrayList<>(List.of("title", "In feet"));
-        Matcher hidden = Pattern.compile("type=\"hidden\" name=\"(?!_csrf)([^\"]+)\" value=\"([^\"]*)\"").matcher(form);
+        Matcher hidden = Pattern.compile("type=\"hidden\" name=\"(?!_csrf)([^\"]+)\" value=\"([^\"]*)\"")
+                .matcher(form);
         while (hidden.find()) {
             sent.addAll(List.of(hidden.group(1), hidden.group(2)));
         }

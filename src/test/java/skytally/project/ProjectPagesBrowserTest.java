@@ -35,8 +35,7 @@ class ProjectPagesBrowserTest {
             browser.open("/projects");
             type(browser, "title", "From nothing");
             send(browser, "title", "The project is kept.");
-            id = UUID.fromString(
-                    browser.driver().getCurrentUrl().replaceAll("^.*/projects/([0-9a-f-]{36}).*$", "$1"));
+            id = UUID.fromString(browser.driver().getCurrentUrl().replaceAll("^.*/projects/([0-9a-f-]{36}).*$", "$1"));
 
             follow(browser, "Documents");
             type(browser, "mark", "D1");

@@ -65,7 +65,10 @@ class ErrorsPageTest {
         assertThat(page.header("Content-Security-Policy")).isEqualTo(PageHeadersFilter.CONTENT_SECURITY_POLICY);
         assertThat(page.body())
                 .contains("<h1>The request could not be read</h1>", "What happened", "What is kept", "What to do")
-                .contains("href=\"/css/tokens.css\"", "class=\"app-told\"", path.startsWith("/%") ? "telescope" : "data-theme")
+                .contains(
+                        "href=\"/css/tokens.css\"",
+                        "class=\"app-told\"",
+                        path.startsWith("/%") ? "telescope" : "data-theme")
                 .doesNotContainIgnoringCase("tomcat")
                 .doesNotContain("Exception", "<script", " style=");
     }

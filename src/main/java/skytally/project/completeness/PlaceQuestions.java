@@ -76,8 +76,8 @@ final class PlaceQuestions {
     }
 
     Answer observatory() {
-        List<Place> named = Stream.concat(ofKind("observatory"), ofKind("reserve-boundary"))
-                .toList();
+        List<Place> named =
+                Stream.concat(ofKind("observatory"), ofKind("reserve-boundary")).toList();
         Optional<Place> placed = named.stream()
                 .filter(place -> Spot.of(place.values()).isPresent())
                 .min(Comparator.comparingDouble(PlaceQuestions::fromReferenceM));
@@ -104,8 +104,7 @@ final class PlaceQuestions {
     }
 
     private static double fromReferenceM(Place place) {
-        return new Position(0, 0, 0)
-                .groundDistanceTo(at(Spot.of(place.values()).orElseThrow()));
+        return new Position(0, 0, 0).groundDistanceTo(at(Spot.of(place.values()).orElseThrow()));
     }
 
     private static Position at(Spot spot) {
@@ -130,8 +129,7 @@ final class PlaceQuestions {
         return new Answer(question, reply, says, List.of(with), "places", "places", "");
     }
 
-    private static Answer at(
-            Place place, Question question, Reply reply, String says, String anchor, Object... with) {
+    private static Answer at(Place place, Question question, Reply reply, String says, String anchor, Object... with) {
         return new Answer(
                 question, reply, says, List.of(with), "places/" + place.mark() + anchor, "place", place.mark());
     }

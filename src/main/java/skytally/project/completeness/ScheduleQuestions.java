@@ -57,16 +57,15 @@ final class ScheduleQuestions {
         if (types.isEmpty()) {
             return noTypes(Question.COUNTS);
         }
-        String placed = Told.whole(
-                scheme.types().stream().mapToLong(this::placed).sum());
+        String placed =
+                Told.whole(scheme.types().stream().mapToLong(this::placed).sum());
         List<String> unknown = marks(type -> isOpen(type, "count"));
         List<String> differ = scheme.types().stream()
                 .filter(type -> Told.number(type.values(), "count").orElse(placed(type)) != placed(type))
                 .map(LuminaireType::mark)
                 .toList();
         List<String> disputed = marks(type -> type.values().get("count").isDisputed());
-        List<String> dark = marks(
-                type -> Told.number(type.values(), "lumens").isEmpty() && !isOpen(type, "count"));
+        List<String> dark = marks(type -> Told.number(type.values(), "lumens").isEmpty() && !isOpen(type, "count"));
         String scheduled = Told.whole((long) types.stream()
                 .mapToDouble(type -> Told.number(type.values(), "count").orElse(0))
                 .sum());
@@ -110,13 +109,7 @@ final class ScheduleQuestions {
 
     private Answer positions(Reply reply, String says, Object... with) {
         return new Answer(
-                Question.COUNTS,
-                reply,
-                says,
-                List.of(with),
-                "lights/" + scheme.mark() + "/positions",
-                "positions",
-                "");
+                Question.COUNTS, reply, says, List.of(with), "lights/" + scheme.mark() + "/positions", "positions", "");
     }
 
     Answer tilt() {
@@ -137,13 +130,7 @@ final class ScheduleQuestions {
         }
         if (!unsaid.isEmpty()) {
             return type(
-                    Question.TILT,
-                    Reply.NOT_KNOWN,
-                    "unsaid",
-                    unsaid.get(0),
-                    "tilt",
-                    types.size(),
-                    Told.marks(unsaid));
+                    Question.TILT, Reply.NOT_KNOWN, "unsaid", unsaid.get(0), "tilt", types.size(), Told.marks(unsaid));
         }
         LuminaireType most = types.stream()
                 .max(Comparator.comparingDouble(type -> steepest(type).orElse(0)))
@@ -184,14 +171,13 @@ final class ScheduleQuestions {
         }
         List<String> said =
                 marks(type -> Told.isSaid(type.values().get("upwardShare").inUse()));
-        List<String> lacking = marks(
-                type -> isOpen(type, "upwardShare") && (isOpen(type, "shape") || isOpen(type, "tilt")));
+        List<String> lacking =
+                marks(type -> isOpen(type, "upwardShare") && (isOpen(type, "shape") || isOpen(type, "tilt")));
         List<String> workedOut = marks(type -> isOpen(type, "upwardShare")
                 && Told.isSaid(type.values().get("shape").inUse())
                 && isTiltSaid(type));
-        List<String> assumed = marks(type -> !said.contains(type.mark())
-                && !lacking.contains(type.mark())
-                && !workedOut.contains(type.mark()));
+        List<String> assumed = marks(type ->
+                !said.contains(type.mark()) && !lacking.contains(type.mark()) && !workedOut.contains(type.mark()));
         if (!lacking.isEmpty()) {
             return type(
                     Question.UPWARD,
@@ -249,7 +235,13 @@ final class ScheduleQuestions {
                 marks(type -> type.values().get("lateOutput").inUse().state() == State.ASSUMED);
         if (!lacking.isEmpty()) {
             return type(
-                    Question.LATE, Reply.NO, "lacking", lacking.get(0), "lateOutput", types.size(), Told.marks(lacking));
+                    Question.LATE,
+                    Reply.NO,
+                    "lacking",
+                    lacking.get(0),
+                    "lateOutput",
+                    types.size(),
+                    Told.marks(lacking));
         }
         List<String> unsure =
                 Stream.concat(disputed.stream(), assumed.stream()).distinct().toList();
@@ -292,8 +284,7 @@ final class ScheduleQuestions {
                 .filter(type -> !isOpen(type, "shield") && !isNone(type.values().text("shield")))
                 .toList();
         List<String> unordered = shielded.stream()
-                .filter(type ->
-                        !isOfTheProduct(type.values().get("shield").inUse()))
+                .filter(type -> !isOfTheProduct(type.values().get("shield").inUse()))
                 .map(LuminaireType::mark)
                 .toList();
         if (!unordered.isEmpty()) {

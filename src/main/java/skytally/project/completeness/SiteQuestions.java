@@ -71,7 +71,8 @@ final class SiteQuestions {
     }
 
     private Optional<String> date(Claim claim) {
-        Matcher inWords = DATE.matcher(claim.source().place() + " " + claim.source().reason());
+        Matcher inWords =
+                DATE.matcher(claim.source().place() + " " + claim.source().reason());
         if (inWords.find()) {
             return Optional.of(inWords.group());
         }

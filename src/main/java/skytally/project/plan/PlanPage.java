@@ -69,6 +69,7 @@ record PlanPage(
 
     /** What lies farther is no corner of a site. */
     private static final double FARTHEST_M = 1_000_000;
+
     private static final Pattern CORNER = Pattern.compile("(-?\\d+(?:\\.\\d+)?)[\\s,]+(-?\\d+(?:\\.\\d+)?)");
 
     /** A scheme that may be drawn. */
@@ -111,8 +112,8 @@ record PlanPage(
 
     /** The lights of the scheme, and those that are there already and stay. */
     private static List<Hung> hung(Project project, Scheme scheme) {
-        Stream<Scheme> existing = project.schemes().stream()
-                .filter(one -> one.kind() == Scheme.Kind.EXISTING && !one.equals(scheme));
+        Stream<Scheme> existing =
+                project.schemes().stream().filter(one -> one.kind() == Scheme.Kind.EXISTING && !one.equals(scheme));
         return Stream.concat(Stream.of(scheme), existing)
                 .flatMap(one -> hung(one, !one.equals(scheme)))
                 .toList();
@@ -125,8 +126,7 @@ record PlanPage(
         return scheme.placements().stream()
                 .filter(light -> types.containsKey(light.type()))
                 .flatMap(light -> Spot.of(light.values()).stream()
-                        .map(spot -> new Hung(
-                                scheme, Objects.requireNonNull(types.get(light.type())), light, spot)));
+                        .map(spot -> new Hung(scheme, Objects.requireNonNull(types.get(light.type())), light, spot)));
     }
 
     /** Pairs of numbers, east and north, however they are set apart. */
@@ -150,8 +150,8 @@ record PlanPage(
             List<Point> outline, List<Hung> hung, List<Place> placed, Unit unit, Words words) {
         List<Light> lights = hung.stream().map(PlanPage::light).toList();
         List<SitePlan.Place> places = placed.stream().map(PlanPage::place).toList();
-        List<Point> site = Stream.concat(outline.stream(), lights.stream().map(Light::at))
-                .toList();
+        List<Point> site =
+                Stream.concat(outline.stream(), lights.stream().map(Light::at)).toList();
         if (site.isEmpty() && places.isEmpty()) {
             return List.of();
         }
@@ -172,8 +172,8 @@ record PlanPage(
         pictures.add(
                 picture("plan-site", new SitePlan(whole, unit, outline, lights, places, null), hung, shown, words));
         if (shown.size() < places.size()) {
-            Frame all = Frame.around(withReference(
-                    Stream.concat(near.stream(), places.stream().map(SitePlan.Place::at))));
+            Frame all = Frame.around(
+                    withReference(Stream.concat(near.stream(), places.stream().map(SitePlan.Place::at))));
             pictures.add(picture(
                     "plan-all", new SitePlan(all, unit, outline, List.of(), places, whole), hung, places, words));
         }
@@ -182,8 +182,7 @@ record PlanPage(
 
     private static Frame grown(Frame frame) {
         double beside = Math.max(
-                LEAST_BESIDE_M,
-                BESIDE * Math.max(frame.eastM() - frame.westM(), frame.northM() - frame.southM()));
+                LEAST_BESIDE_M, BESIDE * Math.max(frame.eastM() - frame.westM(), frame.northM() - frame.southM()));
         return new Frame(
                 frame.westM() - beside, frame.eastM() + beside, frame.southM() - beside, frame.northM() + beside);
     }
@@ -192,17 +191,11 @@ record PlanPage(
         return Stream.concat(points, Stream.of(new Point(0, 0))).toList();
     }
 
-    private static Picture picture(
-            String id, SitePlan plan, List<Hung> hung, List<SitePlan.Place> shown, Words words) {
+    private static Picture picture(String id, SitePlan plan, List<Hung> hung, List<SitePlan.Place> shown, Words words) {
         String name = words.say("plan." + id);
-        String says = words.say(
-                "plan." + id + ".says", hung.size(), shown.size(), plan.ringStep(), plan.blockLength());
+        String says = words.say("plan." + id + ".says", hung.size(), shown.size(), plan.ringStep(), plan.blockLength());
         return new Picture(
-                id,
-                name,
-                says,
-                plan.svg(id + "-wide", name, says, WIDE),
-                plan.svg(id + "-narrow", name, says, NARROW));
+                id, name, says, plan.svg(id + "-wide", name, says, WIDE), plan.svg(id + "-narrow", name, says, NARROW));
     }
 
     private static Light light(Hung hung) {
@@ -230,14 +223,18 @@ record PlanPage(
                         values.text("what"),
                         values.text("kind").isEmpty()
                                 ? ""
-                                : words.find("choice.kind." + values.text("kind")).orElse(values.text("kind")))
+                                : words.find("choice.kind." + values.text("kind"))
+                                        .orElse(values.text("kind")))
                 .filter(part -> !part.isEmpty())
                 .collect(Collectors.joining("; "));
         return row(place.mark(), what, Spot.of(values).orElseThrow(), unit, base + "/places/" + place.mark());
     }
 
     private static Row row(Hung hung, Unit unit, String base) {
-        String what = Stream.of(hung.type().mark(), hung.type().values().text("use"), hung.scheme().name())
+        String what = Stream.of(
+                        hung.type().mark(),
+                        hung.type().values().text("use"),
+                        hung.scheme().name())
                 .filter(part -> !part.isEmpty())
                 .collect(Collectors.joining(", "));
         return row(
@@ -245,7 +242,8 @@ record PlanPage(
                 what,
                 hung.spot(),
                 unit,
-                base + "/lights/" + hung.scheme().mark() + "/positions/" + hung.light().mark());
+                base + "/lights/" + hung.scheme().mark() + "/positions/"
+                        + hung.light().mark());
     }
 
     private static Row row(String mark, String what, Spot spot, Unit unit, String href) {

@@ -49,8 +49,8 @@ public record CompletePart(List<Choice> schemes, List<Line> lines, String tally,
         List<Answer> answers = Completeness.of(project, about);
         return new CompletePart(
                 project.schemes().stream()
-                        .filter(scheme -> scheme.equals(about)
-                                || !scheme.types().isEmpty())
+                        .filter(scheme ->
+                                scheme.equals(about) || !scheme.types().isEmpty())
                         .map(scheme -> new Choice(scheme.mark(), scheme.name(), scheme.equals(about)))
                         .toList(),
                 answers.stream().map(answer -> line(project, answer, words)).toList(),

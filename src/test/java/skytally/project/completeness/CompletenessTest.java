@@ -103,8 +103,8 @@ class CompletenessTest {
             ostrel-valley | proposed | OBSERVATORY | YES | VC3, Reserve boundary gate: 3 590 m on a bearing of 18°. | places/VC3
             ostrel-valley | existing | COUNTS | NO | 98 lights are on the plan; how many there are is said in more than one way for C4. | lights/existing/types/C4#count
             """)
-    void isAnsweredForTheSamples(
-            String name, String scheme, Question question, Reply reply, String says, String page) throws Exception {
+    void isAnsweredForTheSamples(String name, String scheme, Question question, Reply reply, String says, String page)
+            throws Exception {
         Answer answer = answer(question, sample(name), scheme);
 
         assertThat(sentence(answer)).isEqualTo(says);
@@ -206,7 +206,10 @@ class CompletenessTest {
 
     private static Values window(String eyeHeight, Object... more) {
         List<Object> all = new ArrayList<>(List.of(
-                "kind", "home-window", "eyeHeight", eyeHeight.isEmpty() ? Stated.NOTHING : given(eyeHeight, "m", "D1")));
+                "kind",
+                "home-window",
+                "eyeHeight",
+                eyeHeight.isEmpty() ? Stated.NOTHING : given(eyeHeight, "m", "D1")));
         all.addAll(List.of(more));
         return values(all.toArray());
     }
@@ -214,39 +217,80 @@ class CompletenessTest {
     static Stream<Arguments> cases() {
         Object[] there = {"east", "0", "north", "130"};
         Object[] facing = {"east", "0", "north", "140", "facing", given("180", "°", "D1")};
-        Stated twoCounts =
-                given("2").claimed(Claim.given("3", "", Source.document("D2", ""), Party.AUTHORITY)).using(0);
+        Stated twoCounts = given("2")
+                .claimed(Claim.given("3", "", Source.document("D2", ""), Party.AUTHORITY))
+                .using(0);
         Stated bySheet = given("visor", "", "D2");
         return Stream.of(
-                of(places(window("1.6", facing)), Question.WINDOW, Reply.NO, "1 window of a home is listed, none of"
-                        + " them 3 m up or more."),
+                of(
+                        places(window("1.6", facing)),
+                        Question.WINDOW,
+                        Reply.NO,
+                        "1 window of a home is listed, none of" + " them 3 m up or more."),
                 of(places(window("", facing)), Question.WINDOW, Reply.NOT_KNOWN, "P: how high it is, is not stated."),
                 of(places(window("4")), Question.WINDOW, Reply.NOT_KNOWN, "P4 is 4 m up, but has no position."),
-                of(places(window("4", there), window("5", facing)), Question.WINDOW, Reply.NOT_KNOWN, "P4 is 4 m up;"
-                        + " which way it faces is not stated, so there is no plane to reckon the light in."),
-                of(places(window("3", facing)), Question.WINDOW, Reply.YES, "P3: 3 m up, facing 180°, 40 m from the"
-                        + " nearest light. Whether a nearer one was left out, only a visit tells."),
-                of(lights(2, "count", "3"), Question.COUNTS, Reply.NO, "2 lights are on the plan, 3 on the schedule;"
-                        + " they differ for A."),
-                of(lights(2, "count", twoCounts), Question.COUNTS, Reply.NO, "2 lights are on the plan; how many there"
-                        + " are is said in more than one way for A."),
-                of(lights(2), Question.COUNTS, Reply.NOT_KNOWN, "2 lights are on the plan; the schedule gives no number"
-                        + " for A."),
-                of(lights(2, "count", "2"), Question.COUNTS, Reply.NOT_KNOWN, "2 of 2 lights are on the plan; without"
-                        + " the lumens of A there is no total."),
-                of(lights(2, "count", "2", "lumens", "5 200"), Question.COUNTS, Reply.YES, "2 of 2 lights are on the"
-                        + " plan, of each type as many as the schedule says; together 10 400 lm."),
+                of(
+                        places(window("4", there), window("5", facing)),
+                        Question.WINDOW,
+                        Reply.NOT_KNOWN,
+                        "P4 is 4 m up;"
+                                + " which way it faces is not stated, so there is no plane to reckon the light in."),
+                of(
+                        places(window("3", facing)),
+                        Question.WINDOW,
+                        Reply.YES,
+                        "P3: 3 m up, facing 180°, 40 m from the"
+                                + " nearest light. Whether a nearer one was left out, only a visit tells."),
+                of(
+                        lights(2, "count", "3"),
+                        Question.COUNTS,
+                        Reply.NO,
+                        "2 lights are on the plan, 3 on the schedule;" + " they differ for A."),
+                of(
+                        lights(2, "count", twoCounts),
+                        Question.COUNTS,
+                        Reply.NO,
+                        "2 lights are on the plan; how many there" + " are is said in more than one way for A."),
+                of(
+                        lights(2),
+                        Question.COUNTS,
+                        Reply.NOT_KNOWN,
+                        "2 lights are on the plan; the schedule gives no number" + " for A."),
+                of(
+                        lights(2, "count", "2"),
+                        Question.COUNTS,
+                        Reply.NOT_KNOWN,
+                        "2 of 2 lights are on the plan; without" + " the lumens of A there is no total."),
+                of(
+                        lights(2, "count", "2", "lumens", "5 200"),
+                        Question.COUNTS,
+                        Reply.YES,
+                        "2 of 2 lights are on the"
+                                + " plan, of each type as many as the schedule says; together 10 400 lm."),
                 of(lights(1), Question.TILT, Reply.NOT_KNOWN, "In no paper: the tilt of A."),
                 of(lights(1, "tilt", assumed("20")), Question.TILT, Reply.NOT_KNOWN, "In no paper: the tilt of A."),
                 of(lights(1, "tilt", "91"), Question.TILT, Reply.NO, "Turned above level: A."),
-                of(lights(1, "tilt", "90"), Question.TILT, Reply.YES, "Every type has one; the greatest is that of A, 90°."),
+                of(
+                        lights(1, "tilt", "90"),
+                        Question.TILT,
+                        Reply.YES,
+                        "Every type has one; the greatest is that of A, 90°."),
                 of(lights(1), Question.UPWARD, Reply.NO, "Told for 0 of 1 type; for A neither it nor shape and tilt."),
-                of(lights(1, "shape", "beam-60", "tilt", "20"), Question.UPWARD, Reply.YES, "Types for which it is"
-                        + " stated: 0; worked out from shape and tilt: 1."),
-                of(lights(1, "shape", assumed("beam-60"), "tilt", "20"), Question.UPWARD, Reply.NOT_KNOWN, "Told"
-                        + " for 0 of 1 type; for A it rests on what we assumed."),
-                of(lights(1, "lumensBasis", "luminaire-maintained"), Question.INITIAL, Reply.NO, "Those of A are of an"
-                        + " aged luminaire, which flatters."),
+                of(
+                        lights(1, "shape", "beam-60", "tilt", "20"),
+                        Question.UPWARD,
+                        Reply.YES,
+                        "Types for which it is" + " stated: 0; worked out from shape and tilt: 1."),
+                of(
+                        lights(1, "shape", assumed("beam-60"), "tilt", "20"),
+                        Question.UPWARD,
+                        Reply.NOT_KNOWN,
+                        "Told" + " for 0 of 1 type; for A it rests on what we assumed."),
+                of(
+                        lights(1, "lumensBasis", "luminaire-maintained"),
+                        Question.INITIAL,
+                        Reply.NO,
+                        "Those of A are of an" + " aged luminaire, which flatters."),
                 of(site("zone", assumed("E2")), Question.ZONE, Reply.YES, "E2: a guess."),
                 of(
                         site("zone", Stated.of(Claim.given("E2", "", Source.NONE, Party.OURS))),
@@ -254,17 +298,29 @@ class CompletenessTest {
                         Reply.NO,
                         "E2 is stated, without a document and without a reason."),
                 of(
-                        site("zone", assumed("E2"), "lightingZone", Stated.of(
-                                Claim.given("LZ1", "", Source.NONE, Party.OURS))),
+                        site(
+                                "zone",
+                                assumed("E2"),
+                                "lightingZone",
+                                Stated.of(Claim.given("LZ1", "", Source.NONE, Party.OURS))),
                         Question.ZONE,
                         Reply.NO,
                         "LZ1 is stated, without a document and without a reason."),
-                of(lights(1, "earlyOutput", "100"), Question.LATE, Reply.NO, "Neither hours nor a late output are"
-                        + " stated for A."),
-                of(lights(1, "hours", "dusk to dawn"), Question.LATE, Reply.YES, "Every type says what is on after"
-                        + " 23:00."),
-                of(site("existingZenithBrightness", assumed("20.9")), Question.READING, Reply.NO, "20.9, a guess; but"
-                        + " no date."),
+                of(
+                        lights(1, "earlyOutput", "100"),
+                        Question.LATE,
+                        Reply.NO,
+                        "Neither hours nor a late output are" + " stated for A."),
+                of(
+                        lights(1, "hours", "dusk to dawn"),
+                        Question.LATE,
+                        Reply.YES,
+                        "Every type says what is on after" + " 23:00."),
+                of(
+                        site("existingZenithBrightness", assumed("20.9")),
+                        Question.READING,
+                        Reply.NO,
+                        "20.9, a guess; but" + " no date."),
                 of(
                         site("existingZenithBrightness", given("20.9", "mag/arcsec²", "D2")),
                         Question.READING,
@@ -279,14 +335,23 @@ class CompletenessTest {
                         Reply.YES,
                         "20.9 on 2026-09-14: read on 2026-09-14 at 23:10."),
                 of(places(values("kind", "observatory")), Question.OBSERVATORY, Reply.NOT_KNOWN, "P has no position."),
-                of(places(), Question.OBSERVATORY, Reply.NO, "None is listed. If none lies within reach, the papers"
-                        + " should say so."),
+                of(
+                        places(),
+                        Question.OBSERVATORY,
+                        Reply.NO,
+                        "None is listed. If none lies within reach, the papers" + " should say so."),
                 of(lights(1), Question.SHIELDS, Reply.NOT_KNOWN, "Nothing is said of a shield for A."),
                 of(lights(1, "shield", "none"), Question.SHIELDS, Reply.YES, "No type relies on one."),
-                of(lights(1, "shield", "visor"), Question.SHIELDS, Reply.NOT_KNOWN, "1 of 1 type has one; no paper"
-                        + " about the product says so of A."),
-                of(lights(1, "shield", bySheet), Question.SHIELDS, Reply.YES, "Papers about the product show those of"
-                        + " A."));
+                of(
+                        lights(1, "shield", "visor"),
+                        Question.SHIELDS,
+                        Reply.NOT_KNOWN,
+                        "1 of 1 type has one; no paper" + " about the product says so of A."),
+                of(
+                        lights(1, "shield", bySheet),
+                        Question.SHIELDS,
+                        Reply.YES,
+                        "Papers about the product show those of" + " A."));
     }
 
     private static Arguments of(Project project, Question question, Reply reply, String says) {

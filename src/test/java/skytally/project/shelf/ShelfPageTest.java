@@ -300,8 +300,8 @@ class ShelfPageTest {
     void answersEveryPageWhateverTheValuesAre(String value) throws Exception {
         String quoted = "\"" + value + "\"";
         String file = new String(
-                        ProjectFile.write(Copies.withFreshId(
-                                Samples.byName("ferrin-lane").orElseThrow())),
+                        ProjectFile.write(
+                                Copies.withFreshId(Samples.byName("ferrin-lane").orElseThrow())),
                         StandardCharsets.UTF_8)
                 .replaceAll(
                         "(\"(?:value|unit|low|high)\" : )\"[^\"]*\"",
@@ -326,7 +326,9 @@ class ShelfPageTest {
         int before = projects.list().size();
         String good = new String(ProjectFile.write(Copies.withFreshId(Cases.aSportsGround())), StandardCharsets.UTF_8);
 
-        refused(good.replace("\"bearingDeg\" : \"200.0\"", "\"bearingDeg\" : \"" + bearing + "\""), "/places/0/looks/0: ");
+        refused(
+                good.replace("\"bearingDeg\" : \"200.0\"", "\"bearingDeg\" : \"" + bearing + "\""),
+                "/places/0/looks/0: ");
         refused(good.replace("\"bearingDeg\" : \"200.0\"", "\"bearingDeg\" : NaN"), "not JSON at line");
         assertThat(projects.list()).hasSize(before);
     }
