@@ -77,7 +77,7 @@ public final class Browser implements AutoCloseable {
                         .usingDriverExecutable(DRIVER.toFile())
                         .build(),
                 options);
-        driver.manage().timeouts().pageLoadTimeout(PATIENCE);
+        driver.manage().timeouts().pageLoadTimeout(PATIENCE).scriptTimeout(PATIENCE.multipliedBy(3));
         width(WIDE);
     }
 
@@ -174,7 +174,16 @@ public final class Browser implements AutoCloseable {
      * own policy does not take from the driver.
      */
     public List<String> accessibilityFaults() {
-        Results results = new AxeBuilder().analyze(driver);
+        return faults(new AxeBuilder());
+    }
+
+    /** The same of nothing but the contrast of text, which is all that another theme can change. */
+    public List<String> contrastFaults() {
+        return faults(new AxeBuilder().withRules(List.of("color-contrast")));
+    }
+
+    private List<String> faults(AxeBuilder axe) {
+        Results results = axe.analyze(driver);
         if (results.isErrored()) {
             throw new IllegalStateException("axe could not look at the page: " + results.getErrorMessage());
         }

@@ -16,7 +16,7 @@ import skytally.project.Projects;
 import skytally.project.Saving;
 import skytally.web.Switches.Theme;
 
-/** Looks at every page of a project, in every theme wide, and by day as on a telephone. */
+/** Looks at every page of a project, by day wide and as on a telephone; in the other themes at its contrast. */
 @InBrowser
 @SpringBootTest(webEnvironment = SpringBootTest.WebEnvironment.RANDOM_PORT)
 @DisplayName("Every page of a project, in a browser")
@@ -45,34 +45,38 @@ class EveryPageBrowserTest {
         List<String> faults = new ArrayList<>();
         try (Browser browser = Browser.on(port)) {
             for (String page : pages()) {
-                for (Theme theme : Theme.values()) {
-                    browser.width(Browser.WIDE);
-                    browser.open(themed(page, theme));
-                    if (theme == Theme.DARK) {
-                        browser.driver()
-                                .executeScript("document.querySelectorAll('details').forEach(one => one.open = true)");
+                for (int width : new int[] {Browser.WIDE, Browser.NARROW}) {
+                    open(browser, page, Theme.DAY, width);
+                    browser.screenshot("every" + name(page) + "-" + width, width);
+                    note(faults, page + " at " + width, browser.accessibilityFaults());
+                    if (browser.scrollsSideways()) {
+                        faults.add(page + " scrolls sideways at " + width);
                     }
-                    look(browser, page, theme, Browser.WIDE, faults);
                 }
-                browser.width(Browser.NARROW);
-                browser.open(themed(page, Theme.DAY));
-                look(browser, page, Theme.DAY, Browser.NARROW, faults);
+                for (Theme theme : List.of(Theme.DARK, Theme.TELESCOPE)) {
+                    open(browser, page, theme, Browser.WIDE);
+                    note(faults, page + " " + theme, browser.contrastFaults());
+                }
             }
         }
         assertThat(faults).isEmpty();
     }
 
-    private static String themed(String page, Theme theme) {
-        return page + (page.contains("?") ? "&" : "?") + "theme=" + theme.word();
+    /** Wide with all that opens open, narrow as it comes. */
+    private static void open(Browser browser, String page, Theme theme, int width) {
+        browser.width(width);
+        browser.open(page + (page.contains("?") ? "&" : "?") + "theme=" + theme.word());
+        if (width == Browser.WIDE) {
+            browser.driver().executeScript("document.querySelectorAll('details').forEach(one => one.open = true)");
+        }
     }
 
-    private static void look(Browser browser, String page, Theme theme, int width, List<String> faults) {
-        String name = page.replaceAll("/projects/[0-9a-f-]{36}", "project").replaceAll("[^a-zA-Z0-9-]+", "-");
-        browser.screenshot("every" + name + "-" + width + "-" + theme.word(), width);
-        browser.accessibilityFaults().forEach(fault -> faults.add(name + " " + width + " " + theme + ": " + fault));
-        if (browser.scrollsSideways()) {
-            faults.add(name + " scrolls sideways at " + width);
-        }
+    private static void note(List<String> faults, String where, List<String> found) {
+        found.forEach(fault -> faults.add(where + ": " + fault));
+    }
+
+    private static String name(String page) {
+        return page.replaceAll("/projects/[0-9a-f-]{36}", "-project").replaceAll("[^a-zA-Z0-9-]+", "-");
     }
 
     @Test
