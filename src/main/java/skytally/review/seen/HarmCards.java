@@ -260,8 +260,7 @@ final class HarmCards {
                 "Toward the site, 30° up: ",
                 Quantity.increase(toward.likely()),
                 doors.here(toward),
-                ", from " + brightness("toward-site/sky/natural-brightness") + " to "
-                        + brightness("toward-site/sky/brightness") + "\u00a0mag/arcsec²."));
+                " over the natural sky, " + fromTo("toward-site") + "."));
         List<Said> more = new ArrayList<>(more("zenith/sky/increase", Quantity::increase, " overhead"));
         return new Card(
                 "Sky glow",
@@ -270,10 +269,19 @@ final class HarmCards {
                 doors.here(increase),
                 "% overhead",
                 RangeText.of(increase, Quantity::increase).orElse(null),
-                "at least; over a natural sky of 22.0, from " + brightness("zenith/sky/natural-brightness") + " to "
-                        + brightness("zenith/sky/brightness") + "\u00a0mag/arcsec²",
+                "at least; over a natural sky of 22.0; " + fromTo("zenith"),
                 says,
                 more);
+    }
+
+    /** From the sky as it is where that is known, else from the natural one. */
+    private String fromTo(String look) {
+        boolean known =
+                found.find(place.mark(), look + "/sky/present-brightness").isPresent();
+        return (known
+                        ? "from " + brightness(look + "/sky/present-brightness") + " as it is"
+                        : "from " + brightness(look + "/sky/natural-brightness") + " by nature")
+                + " to " + brightness(look + "/sky/brightness") + "\u00a0mag/arcsec²";
     }
 
     private String brightness(String measure) {
