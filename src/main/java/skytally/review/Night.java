@@ -31,7 +31,7 @@ public record Night(Scene scene, List<String> leftOut, List<String> unplaced, Op
     /** Rough size in memory, counted in figures. */
     int weight() {
         return 1
-                + scene.lamps().size()
+                + scene.allLamps().size()
                 + assessment
                         .map(found -> found.figures().size()
                                 + found.influences().size() / 8

@@ -83,11 +83,11 @@ public record PlaceFrame(
 
     /** Which hour it is and how much of the schedule is lit then. */
     private static String lit(Review review) {
-        long all = review.shown().scene().lamps().stream()
+        long all = review.shown().scene().allLamps().stream()
                 .map(Lamp::type)
                 .distinct()
                 .count();
-        long lit = review.shown().scene().lamps().stream()
+        long lit = review.shown().scene().allLamps().stream()
                 .filter(lamp -> lamp.allFlux().lumens() > 0)
                 .map(Lamp::type)
                 .distinct()

@@ -72,7 +72,7 @@ record SkyPage(
             Cell overPresent) {}
 
     /** One thing that fades. */
-    record Fade(String name, String unit, Cell natural, Cell with) {}
+    record Fade(String name, String unit, Cell natural, Cell present, Cell with) {}
 
     /** What one type causes. */
     record Cause(String name, Part overhead, Part toward) {}
@@ -151,25 +151,30 @@ record SkyPage(
                         "Faintest star, " + name.substring(0, 1).toLowerCase(Locale.ROOT) + name.substring(1),
                         "magnitude",
                         magnitude(look.id() + "/eye/limit-natural"),
+                        magnitude(look.id() + "/eye/limit-present"),
                         magnitude(look.id() + "/eye/limit")));
             }
             fades.add(new Fade(
                     "Stars above the horizon by eye",
                     "about",
                     stars(ZENITH + "/eye/stars-natural"),
+                    stars(ZENITH + "/eye/stars-present"),
                     stars(ZENITH + "/eye/stars")));
             return fades;
         }
 
         private Cell magnitude(String measure) {
-            Figure figure = found.figure(place, measure);
-            return cell(figure, value -> QuantityFormat.decimals(value, 2).digits());
+            return cell(measure, value -> QuantityFormat.decimals(value, 2).digits());
         }
 
         private Cell stars(String measure) {
-            return cell(
-                    found.figure(place, measure),
-                    value -> QuantityFormat.significant(value, 2).digits());
+            return cell(measure, value -> QuantityFormat.significant(value, 2).digits());
+        }
+
+        private Cell cell(String measure, DoubleFunction<String> written) {
+            return found.find(place, measure)
+                    .map(figure -> cell(figure, written))
+                    .orElse(Cell.NONE);
         }
 
         private List<Cause> causes() {
