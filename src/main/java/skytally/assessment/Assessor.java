@@ -77,8 +77,7 @@ public final class Assessor {
         private List<Contribution> contributions(PlaceNumbers place) {
             return scope.isInFull(place.observer().mark())
                     ? place.contributions()
-                    : place.contributions(look -> scope.others() == Scope.Others.DIRECT_AND_OVERHEAD
-                            && look.id().equals(Look.ZENITH));
+                    : place.shares(scope.others() == Scope.Others.DIRECT_AND_OVERHEAD);
         }
 
         Assessment assessment() {

@@ -10,7 +10,6 @@ import java.util.Map;
 import java.util.Objects;
 import java.util.Optional;
 import java.util.Set;
-import java.util.function.Predicate;
 import org.jspecify.annotations.Nullable;
 import skytally.atmosphere.Atmosphere;
 import skytally.atmosphere.DirectPath;
@@ -77,6 +76,7 @@ final class PlaceNumbers {
     private final int hidden;
     private @Nullable Double otherLight;
     private @Nullable Position worstOfPane;
+    private @Nullable Map<String, Double> overheadShares;
 
     /** What one direction gave. */
     private record Looked(double[] numbers, SkyLight sky, SkyLight skyNow) {}
@@ -417,21 +417,31 @@ final class PlaceNumbers {
         return found;
     }
 
-    /** What each type adds, in the order of the lamps, to the sky in every direction looked in. */
+    /** What each type adds, in the order of the lamps. */
     List<Contribution> contributions() {
-        return contributions(look -> true);
+        Map<String, Map<String, Double>> sky = new LinkedHashMap<>();
+        for (int i = 0; i < looks.size(); i++) {
+            if (looks.get(i).purpose() == Look.Purpose.SKY) {
+                sky.put(looks.get(i).id(), sky(i).byTypeCdM2());
+            }
+        }
+        return contributions(sky);
     }
 
-    /** The same, to the sky in some directions only. */
-    List<Contribution> contributions(Predicate<Look> toSky) {
+    /** The same for a place that is not looked at itself: of the sky at most what is overhead, and within 1 %. */
+    List<Contribution> shares(boolean overhead) {
+        if (overhead && overheadShares == null) {
+            overheadShares = over.sharesAlong(new Look(Look.ZENITH, Look.Purpose.SKY, Direction.UP))
+                    .byTypeCdM2();
+        }
+        return contributions(overheadShares == null ? Map.of() : Map.of(Look.ZENITH, overheadShares));
+    }
+
+    private List<Contribution> contributions(Map<String, Map<String, Double>> skyByLook) {
         List<Contribution> contributions = new ArrayList<>();
         byType.forEach((type, sums) -> {
             Map<String, Double> bySky = new LinkedHashMap<>();
-            for (int i = 0; i < looks.size(); i++) {
-                if (looks.get(i).purpose() == Look.Purpose.SKY && toSky.test(looks.get(i))) {
-                    bySky.put(looks.get(i).id(), sky(i).byTypeCdM2().getOrDefault(type, 0.0));
-                }
-            }
+            skyByLook.forEach((look, sky) -> bySky.put(look, sky.getOrDefault(type, 0.0)));
             contributions.add(new Contribution(observer.mark(), type, sums[0], sums[1], sums[2], bySky));
         });
         return contributions;

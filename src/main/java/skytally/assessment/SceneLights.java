@@ -59,19 +59,24 @@ final class SceneLights {
         }
 
         SkyLight along(Look look) {
-            return along(look, seen, lamps);
+            return along(look, seen.along(look.direction()), lamps);
+        }
+
+        /** Good enough for the shares of the types, and quicker. */
+        SkyLight sharesAlong(Look look) {
+            return along(look, seen.along(look.direction(), GatheredLights.APART_FOR_SHARES), lamps);
         }
 
         /** Of the lamps that shine at present. */
         SkyLight atPresent(Look look) {
-            return along(look, seenNow, present);
+            return along(look, seenNow.along(look.direction()), present);
         }
 
-        private SkyLight along(Look look, GatheredLights.View view, GatheredLights all) {
+        private SkyLight along(Look look, List<GatheredLights.Light> lights, GatheredLights all) {
             return SkyLight.along(
                     look,
                     eye,
-                    view.along(look.direction()),
+                    lights,
                     all.strands(),
                     scene.surroundings().groundReflectance(),
                     air);

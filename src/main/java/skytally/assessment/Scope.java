@@ -17,7 +17,7 @@ public record Scope(Optional<String> place, Others others) {
         NOTHING,
         /** What each type adds to the light there and to the glare. */
         DIRECT,
-        /** That, and what each type adds to the sky overhead. */
+        /** That, and what each type adds to the sky overhead, within 1 %. */
         DIRECT_AND_OVERHEAD
     }
 
@@ -27,11 +27,12 @@ public record Scope(Optional<String> place, Others others) {
         return new Scope(Optional.of(place), others);
     }
 
+    /** The worst point of the property line has few figures and gets them wherever it is wanted. */
     boolean isInFull(String mark) {
-        return place.map(mark::equals).orElse(true);
+        return place.map(mark::equals).orElse(true) || mark.equals(Assessment.PROPERTY_LINE);
     }
 
     boolean isWanted(String mark) {
-        return others != Others.NOTHING || isInFull(mark);
+        return others != Others.NOTHING || place.map(mark::equals).orElse(true);
     }
 }

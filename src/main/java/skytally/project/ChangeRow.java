@@ -6,6 +6,7 @@ import jakarta.persistence.GeneratedValue;
 import jakarta.persistence.GenerationType;
 import jakarta.persistence.Id;
 import jakarta.persistence.Lob;
+import jakarta.persistence.SequenceGenerator;
 import jakarta.persistence.Table;
 import java.time.Instant;
 import java.util.UUID;
@@ -18,7 +19,11 @@ import skytally.project.transfer.Difference;
 class ChangeRow {
 
     @Id
-    @GeneratedValue(strategy = GenerationType.IDENTITY)
+    @GeneratedValue(strategy = GenerationType.SEQUENCE, generator = "project_change_id")
+    @SequenceGenerator(
+            name = "project_change_id",
+            sequenceName = "project_change_id",
+            allocationSize = 500)
     private Long id;
 
     @Column(name = "project_id")

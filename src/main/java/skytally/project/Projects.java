@@ -1,5 +1,7 @@
 package skytally.project;
 
+import com.github.benmanes.caffeine.cache.Cache;
+import com.github.benmanes.caffeine.cache.Caffeine;
 import java.nio.charset.StandardCharsets;
 import java.time.Clock;
 import java.time.Instant;
@@ -28,6 +30,16 @@ public class Projects {
     /** Characters of a title. */
     public static final int LONGEST_TITLE = 400;
 
+    private static final int LIGHTS_REMEMBERED = 60_000;
+
+    /** Projects as they were read, which never change: reading twenty thousand lights takes longer than a page may. */
+    private final Cache<ReadKey, KeptProject> read = Caffeine.newBuilder()
+            .maximumWeight(LIGHTS_REMEMBERED)
+            .weigher((ReadKey key, KeptProject kept) -> weight(kept.project()))
+            .build();
+
+    private record ReadKey(UUID id, long version, Instant changedAt) {}
+
     private final ProjectRows rows;
     private final ChangeRows changes;
     private final AttachmentRows attachments;
@@ -50,7 +62,7 @@ public class Projects {
 
     @Transactional(readOnly = true)
     public Optional<KeptProject> find(UUID id) {
-        return rows.findById(id).map(Projects::kept);
+        return rows.findById(id).map(this::kept);
     }
 
     /**
@@ -64,7 +76,7 @@ public class Projects {
         try {
             UUID uuid = UUID.fromString(id);
             if (uuid.toString().equals(id)) {
-                return rows.findById(uuid).map(Projects::kept).orElseThrow(NoSuchProjectException::new);
+                return rows.findById(uuid).map(this::kept).orElseThrow(NoSuchProjectException::new);
             }
         } catch (IllegalArgumentException notOne) {
             // the same to whoever asked: there is no such page
@@ -278,9 +290,23 @@ public class Projects {
                 .toList());
     }
 
-    private static KeptProject kept(ProjectRow row) {
+    private KeptProject kept(ProjectRow row) {
+        return read.get(new ReadKey(row.id(), row.version(), row.changedAt()), key -> readAnew(row));
+    }
+
+    /** Rough size in memory, counted in lights. */
+    private static int weight(Project project) {
+        return 100
+                + project.schemes().stream()
+                        .mapToInt(scheme -> 20 * scheme.types().size()
+                                + scheme.placements().size())
+                        .sum();
+    }
+
+    private static KeptProject readAnew(ProjectRow row) {
         try {
-            Project project = ProjectFile.read(row.document().getBytes(StandardCharsets.UTF_8));
+            String text = row.document();
+            Project project = ProjectFile.read(text.getBytes(StandardCharsets.UTF_8));
             return new KeptProject(project, row.version(), row.changedAt());
         } catch (ProjectFileException broken) {
             throw new IllegalStateException("Project " + row.id() + " is not kept whole", broken);

@@ -22,6 +22,7 @@ import skytally.scene.Observer;
  * @param view     from the place; nothing where no lamp sends light there
  * @param byType   light at the eye
  * @param who      causes what
+ * @param edge     the worst point of the property line; nothing where the corners of the site are not known
  */
 record SeenPage(
         PlaceFrame frame,
@@ -30,7 +31,8 @@ record SeenPage(
         LadderPicture ladder,
         @Nullable WindowPicture view,
         ByType byType,
-        WhoCauses who) {
+        WhoCauses who,
+        @Nullable EdgeOfSite edge) {
 
     /** Nothing where the place has no position or no lamp can be reckoned with. */
     static Optional<SeenPage> of(
@@ -55,6 +57,7 @@ record SeenPage(
                 SeenLadder.of(review, place.mark()),
                 WindowPicture.of(review, place, observer.get(), names).orElse(null),
                 ByType.of(review, place.mark(), names, doors),
-                WhoCauses.of(review, place.mark(), harm, names, address)));
+                WhoCauses.of(review, place.mark(), harm, names, address),
+                EdgeOfSite.of(review).orElse(null)));
     }
 }

@@ -35,7 +35,7 @@ class EveryPageBrowserTest {
                                 Saving.by("", "A sample"))
                         .project()
                         .id();
-        List<String> pages = new ArrayList<>(List.of("/", "/projects"));
+        List<String> pages = new ArrayList<>(List.of("/", "/projects", "/guide"));
         ProjectPages.OF_FERRIN_LANE.forEach(page -> pages.add(project + page));
         return pages;
     }
