@@ -35,7 +35,6 @@ class BibliographyTest {
             "observer-age-range",
             "planck-law",
             "spectral-models",
-            "threshold-increment",
             "visual-range");
 
     @ParameterizedTest
