@@ -74,12 +74,7 @@ final class SceneLights {
 
         private SkyLight along(Look look, List<GatheredLights.Light> lights, GatheredLights all) {
             return SkyLight.along(
-                    look,
-                    eye,
-                    lights,
-                    all.strands(),
-                    scene.surroundings().groundReflectance(),
-                    air);
+                    look, eye, lights, all.strands(), scene.surroundings().groundReflectance(), air);
         }
     }
 }

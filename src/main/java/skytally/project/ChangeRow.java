@@ -20,10 +20,7 @@ class ChangeRow {
 
     @Id
     @GeneratedValue(strategy = GenerationType.SEQUENCE, generator = "project_change_id")
-    @SequenceGenerator(
-            name = "project_change_id",
-            sequenceName = "project_change_id",
-            allocationSize = 500)
+    @SequenceGenerator(name = "project_change_id", sequenceName = "project_change_id", allocationSize = 500)
     private Long id;
 
     @Column(name = "project_id")

@@ -298,8 +298,8 @@ public class Projects {
     private static int weight(Project project) {
         return 100
                 + project.schemes().stream()
-                        .mapToInt(scheme -> 20 * scheme.types().size()
-                                + scheme.placements().size())
+                        .mapToInt(scheme ->
+                                20 * scheme.types().size() + scheme.placements().size())
                         .sum();
     }
 

@@ -54,8 +54,7 @@ final class BigScene {
         }
         List<Observer> observers = new ArrayList<>();
         for (int i = 0; i < places; i++) {
-            double distance =
-                    i % 5 == 0 ? 1000 * random.nextDouble() : 1000 + Math.pow(10, 3 + random.nextDouble());
+            double distance = i % 5 == 0 ? 1000 * random.nextDouble() : 1000 + Math.pow(10, 3 + random.nextDouble());
             observers.add(observer("P" + i, distance, 2 * Math.PI * random.nextDouble()));
         }
         return TestScenes.settled(new Scene(
@@ -94,8 +93,8 @@ final class BigScene {
         for (int quarter = 0; quarter < 4; quarter++) {
             looks.add(new Look("quarter-" + quarter, Look.Purpose.SKY, Direction.toward(quarter * Math.PI / 2, low)));
         }
-        Position eye = new Position(
-                distanceM * Math.sin(bearingRad) + 0.37, distanceM * Math.cos(bearingRad) + 0.21, 1.6);
+        Position eye =
+                new Position(distanceM * Math.sin(bearingRad) + 0.37, distanceM * Math.cos(bearingRad) + 0.21, 1.6);
         return new Observer(mark, eye, Direction.toward(toSite, 0), looks);
     }
 }

@@ -76,15 +76,15 @@ class SampleFiguresTest {
         assertThat(assessment.figures()).hasSizeGreaterThan(100);
         for (Figure figure : assessment.figures().values()) {
             assertThat(names.add(figure.key())).as(figure.key()).isTrue();
-            assertThat(figure.key())
-                    .matches("[^/]+/([^/]+/)?(direct|lamp|glare|eye|sky)/[a-z-]+/(early|late)/clear");
+            assertThat(figure.key()).matches("[^/]+/([^/]+/)?(direct|lamp|glare|eye|sky)/[a-z-]+/(early|late)/clear");
             assertThat(figure.name()).as(figure.key()).isNotBlank();
             assertThat(figure.unit().symbol()).as(figure.key()).isNotBlank();
             assertThat(figure.working().formula()).as(figure.key()).contains("=");
             assertThat(figure.working().substituted()).as(figure.key()).doesNotContain("NaN", "Infinity");
-            assertThat(figure.working().sources()).as(figure.key()).isNotEmpty().allSatisfy(source -> assertThat(
-                            source.reference())
-                    .isNotBlank());
+            assertThat(figure.working().sources())
+                    .as(figure.key())
+                    .isNotEmpty()
+                    .allSatisfy(source -> assertThat(source.reference()).isNotBlank());
             assertThat(figure.working().inputs()).as(figure.key()).allSatisfy(input -> {
                 assertThat(input.value()).isNotBlank().doesNotContain("NaN", "Infinity");
                 assertThat(input.known().from()).isNotBlank();
@@ -108,8 +108,7 @@ class SampleFiguresTest {
         }
     }
 
-    private static void adds(
-            Assessment assessment, String place, String measure, ToDoubleFunction<Contribution> part) {
+    private static void adds(Assessment assessment, String place, String measure, ToDoubleFunction<Contribution> part) {
         double whole = assessment.figure(place, measure).likely();
         double sum = assessment.contributions().stream()
                 .filter(contribution -> contribution.place().equals(place))
@@ -129,8 +128,12 @@ class SampleFiguresTest {
                         Math.min(Math.abs(feetEast), Math.abs(feetEast - 700)),
                         Math.min(Math.abs(feetNorth), Math.abs(feetNorth - 590))))
                 .isLessThan(1e-6);
-        assertThat(assessment.figure(Assessment.PROPERTY_LINE, "direct/window-illuminance").likely())
-                .isGreaterThan(assessment.figure("VB4", "direct/worst-plane-illuminance").likely());
+        assertThat(assessment
+                        .figure(Assessment.PROPERTY_LINE, "direct/window-illuminance")
+                        .likely())
+                .isGreaterThan(assessment
+                        .figure("VB4", "direct/worst-plane-illuminance")
+                        .likely());
     }
 
     /** A change of any of these is a change of method: the commit says by how much and why. */
