@@ -1,6 +1,7 @@
 package skytally.skyglow;
 
 import java.io.IOException;
+import java.io.UncheckedIOException;
 import java.lang.ref.SoftReference;
 import java.nio.file.Files;
 import java.nio.file.NoSuchFileException;
@@ -12,7 +13,7 @@ import skytally.atmosphere.Atmosphere;
 
 /**
  * The kernels kept on disk: twenty of them, for hazes of 0.05, 0.10, 0.20, 0.30 and 0.40 over grounds of reflectance
- * 0.05, 0.15, 0.30 and 0.80, about 4 MB each, and any between them without solving. What lies outside is refused with
+ * 0.05, 0.15, 0.30 and 0.80, about 6 MB each, and any between them without solving. What lies outside is refused with
  * the reason; {@link SkyglowKernel#solve} works it out in some seconds.
  *
  * <p>A file that is missing, damaged, of other air or made by an earlier method is made again. Safe for use by
@@ -107,7 +108,7 @@ public final class KernelShelf {
         try {
             return fetch(haze, reflectance, share -> {});
         } catch (IOException e) {
-            throw new java.io.UncheckedIOException(e);
+            throw new UncheckedIOException(e);
         }
     }
 

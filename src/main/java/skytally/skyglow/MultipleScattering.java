@@ -2,8 +2,10 @@ package skytally.skyglow;
 
 import java.util.Arrays;
 import java.util.concurrent.atomic.AtomicInteger;
+import java.util.concurrent.atomic.AtomicReference;
 import java.util.function.DoubleConsumer;
 import java.util.stream.IntStream;
+import org.jspecify.annotations.Nullable;
 import skytally.atmosphere.Atmosphere;
 
 /**
@@ -24,7 +26,9 @@ final class MultipleScattering {
     /** Where lines end at the points of the grid; above is a two-thousandth of the molecules. */
     private static final double TOP_M = 60_000;
 
+    /** No order is taken to be brighter than this share of the one before it, so that the sum of the rest is finite. */
     private static final double HIGHEST_RATIO = 0.95;
+    /** Nor is that share taken to end above this. */
     private static final double HIGHEST_LIMIT = 0.8;
 
     private final LayeredAir air;
@@ -34,6 +38,7 @@ final class MultipleScattering {
     private final int points;
     private final DoubleConsumer progress;
     private final AtomicInteger pointsDone = new AtomicInteger();
+    private final AtomicReference<@Nullable RuntimeException> stopped = new AtomicReference<>();
 
     /** What an order comes to, as it is: moments for each point by function and lane; illuminance of the ground by row and lane. */
     private record Order(double[][] moments, double[] illuminance) {}
@@ -54,7 +59,14 @@ final class MultipleScattering {
      *                 work and is thrown on
      */
     static ScatteredField solve(LayeredAir air, Resolution resolution, DoubleConsumer progress) {
-        return new MultipleScattering(air, resolution, progress).solved();
+        MultipleScattering work = new MultipleScattering(air, resolution, progress);
+        try {
+            return work.solved();
+        } catch (RuntimeException e) {
+            // threads hand on an exception of the same kind, not always the one that was thrown
+            RuntimeException first = work.stopped.get();
+            throw first == null ? e : first;
+        }
     }
 
     private ScatteredField solved() {
@@ -81,7 +93,16 @@ final class MultipleScattering {
     }
 
     private void done() {
-        progress.accept(pointsDone.incrementAndGet() / (double) (points * resolution.orders()));
+        RuntimeException before = stopped.get();
+        if (before != null) {
+            throw before;
+        }
+        try {
+            progress.accept(pointsDone.incrementAndGet() / (double) (points * resolution.orders()));
+        } catch (RuntimeException e) {
+            stopped.compareAndSet(null, e);
+            throw e;
+        }
     }
 
     // ---- one order ----
@@ -144,6 +165,7 @@ final class MultipleScattering {
         Ray ray = new Ray(air);
         double[] radiance = new double[lanes];
         double[] function = new double[basis.size()];
+        double[][] moments = new double[basis.size()][lanes]; // arrays of their own, which the loop over lanes likes
         for (int i = 0; i < directions.count(); i++) {
             double towardLight = directions.towardLight(i);
             double upward = directions.upward(i);
@@ -152,21 +174,24 @@ final class MultipleScattering {
             ray.begin(distance, up, height, rising, towardLight, climb, TOP_M);
             source.gather(ray, radiance);
             basis.at(towardLight, upward, function);
-            addMoments(radiance, function, directions.solidAngle(i), order.moments()[point]);
+            addMoments(radiance, function, directions.solidAngle(i), moments);
             if (level == grid.levels() - 1 && rising > 0) {
                 for (int lane = 0; lane < lanes; lane++) {
                     order.illuminance()[row * lanes + lane] += directions.solidAngle(i) * rising * radiance[lane];
                 }
             }
         }
+        for (int k = 0; k < basis.size(); k++) {
+            System.arraycopy(moments[k], 0, order.moments()[point], k * lanes, lanes);
+        }
     }
 
-    private void addMoments(double[] radiance, double[] function, double solidAngle, double[] moments) {
+    private static void addMoments(double[] radiance, double[] function, double solidAngle, double[][] moments) {
         for (int k = 0; k < function.length; k++) {
             double weight = solidAngle * function[k];
-            int first = k * lanes;
-            for (int lane = 0; lane < lanes; lane++) {
-                moments[first + lane] += weight * radiance[lane];
+            double[] sum = moments[k];
+            for (int lane = 0; lane < radiance.length; lane++) {
+                sum[lane] += weight * radiance[lane];
             }
         }
     }

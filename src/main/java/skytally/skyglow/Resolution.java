@@ -43,20 +43,6 @@ record Resolution(
             6,
             new AngularBasis(12, 3));
 
-    /** A thirtieth of the work: for tests of what does not depend on how fine it is. */
-    static final Resolution COARSE = new Resolution(
-            16,
-            7,
-            4,
-            new DirectionRule.Density(8, 4, 2, 4),
-            8,
-            5,
-            new AngularBasis(10, 2),
-            new DirectionRule.Density(6, 3, 2, 3),
-            5,
-            3,
-            new AngularBasis(6, 1));
-
     Resolution withOrders(int count) {
         return new Resolution(
                 distances,

@@ -1,6 +1,7 @@
 package skytally.skyglow;
 
 import java.util.Arrays;
+import java.util.List;
 
 /**
  * The part of an emission that goes up, by zenith angle alone: the mean over azimuth, as a sum of nine hats. That is
@@ -12,6 +13,8 @@ import java.util.Arrays;
 public final class UpwardShape {
 
     private static final double[][] GRAM = gram();
+
+    private static final UpwardShape MATT_GROUND = of(new MattGround());
 
     private final double[] weights;
 
@@ -28,22 +31,7 @@ public final class UpwardShape {
 
     /** {@code cos z / π}: matt ground that sends back one unit of flux. */
     public static UpwardShape mattGround() {
-        return of(new Emission() {
-            @Override
-            public double toward(double ahead, double left, double up) {
-                return up > 0 ? up / Math.PI : 0;
-            }
-
-            @Override
-            public java.util.List<Cone> edges() {
-                return java.util.List.of();
-            }
-
-            @Override
-            public double heightM() {
-                return 0;
-            }
-        });
+        return MATT_GROUND;
     }
 
     /** Flux upward, in the emission's unit of intensity times steradian. */
@@ -102,5 +90,23 @@ public final class UpwardShape {
     @Override
     public String toString() {
         return "UpwardShape" + Arrays.toString(weights);
+    }
+
+    private record MattGround() implements Emission {
+
+        @Override
+        public double toward(double ahead, double left, double up) {
+            return up > 0 ? up / Math.PI : 0;
+        }
+
+        @Override
+        public List<Cone> edges() {
+            return List.of();
+        }
+
+        @Override
+        public double heightM() {
+            return 0;
+        }
     }
 }

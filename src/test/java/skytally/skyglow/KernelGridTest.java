@@ -36,7 +36,8 @@ class KernelGridTest {
         kept = new SkyglowKernel[KernelGrid.HAZE_DEPTHS.length][KernelGrid.REFLECTANCES.length];
         for (int haze = 0; haze < kept.length; haze++) {
             for (int ground = 0; ground < kept[haze].length; ground++) {
-                kept[haze][ground] = SkyglowKernel.solve(KernelGrid.node(haze, ground), Resolution.COARSE, share -> {});
+                kept[haze][ground] =
+                        SkyglowKernel.solve(KernelGrid.node(haze, ground), TestResolutions.COARSE, share -> {});
             }
         }
         grid = new KernelGrid((haze, ground) -> kept[haze][ground]);
@@ -45,7 +46,7 @@ class KernelGridTest {
     private static SkyglowKernel solved(Atmosphere air, double reflectance) {
         double[] ground = new double[WAVELENGTHS_NM.length];
         Arrays.fill(ground, reflectance);
-        return SkyglowKernel.solve(LayeredAir.of(air, ground, WAVELENGTHS_NM), Resolution.COARSE, share -> {});
+        return SkyglowKernel.solve(LayeredAir.of(air, ground, WAVELENGTHS_NM), TestResolutions.COARSE, share -> {});
     }
 
     private static Atmosphere air(double hazeDepth, double angstrom, double groundHeightM) {

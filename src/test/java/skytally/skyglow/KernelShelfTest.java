@@ -22,19 +22,6 @@ import skytally.atmosphere.Clearness;
 @DisplayName("Kernels on disk")
 class KernelShelfTest {
 
-    private static final Resolution TINY = new Resolution(
-            5,
-            3,
-            2,
-            new DirectionRule.Density(2, 1, 1, 1),
-            2,
-            2,
-            new AngularBasis(2, 0),
-            new DirectionRule.Density(2, 1, 1, 1),
-            2,
-            2,
-            new AngularBasis(2, 0));
-
     private static final Atmosphere CLEAR = Atmosphere.atSeaLevel(Clearness.CLEAR);
 
     @TempDir
@@ -45,12 +32,12 @@ class KernelShelfTest {
     private KernelShelf shelf() {
         return new KernelShelf(directory, (air, progress) -> {
             made.incrementAndGet();
-            return SkyglowKernel.solve(air, TINY, progress);
+            return SkyglowKernel.solve(air, TestResolutions.TINY, progress);
         });
     }
 
     private static SkyglowKernel tiny() {
-        return SkyglowKernel.solve(KernelGrid.node(1, 1), TINY, share -> {});
+        return SkyglowKernel.solve(KernelGrid.node(1, 1), TestResolutions.TINY, share -> {});
     }
 
     private Path written() throws IOException {

@@ -83,7 +83,7 @@ class SkyglowKernelConvergenceTest {
     void followingLightFurtherChangesLessAndLess() {
         List<List<Double>> byOrders = new ArrayList<>();
         for (int orders = 3; orders <= 9; orders += 2) {
-            byOrders.add(totals(SkyglowKernel.solve(AIRS, Resolution.COARSE.withOrders(orders), share -> {})));
+            byOrders.add(totals(SkyglowKernel.solve(AIRS, TestResolutions.COARSE.withOrders(orders), share -> {})));
         }
         double before = Double.POSITIVE_INFINITY;
         for (int i = 1; i < byOrders.size(); i++) {
@@ -111,7 +111,7 @@ class SkyglowKernelConvergenceTest {
                                     Atmosphere.atSeaLevel(Clearness.CLEAR),
                                     new double[] {0.15, 0.15},
                                     new double[] {450, 600}),
-                            Resolution.COARSE,
+                            TestResolutions.COARSE,
                             share -> {}))
                     .get());
         } finally {

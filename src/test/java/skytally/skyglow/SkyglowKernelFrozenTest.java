@@ -21,7 +21,7 @@ class SkyglowKernelFrozenTest {
         SkyglowKernel kernel = SkyglowKernel.solve(
                 LayeredAir.of(
                         Atmosphere.atSeaLevel(Clearness.CLEAR), new double[] {0.15, 0.3}, new double[] {470, 580}),
-                Resolution.COARSE,
+                TestResolutions.COARSE,
                 share -> {});
         byte[] digest = MessageDigest.getInstance("SHA-256").digest(KernelFile.content(kernel));
         assertThat(SkyglowKernel.METHOD).isEqualTo("successive-orders-1");

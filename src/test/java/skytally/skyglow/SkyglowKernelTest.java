@@ -34,7 +34,7 @@ class SkyglowKernelTest {
         double[] molecules = {0.0975, 0.0975, 0.0975, 0.0975};
         double[] haze = {0.1, 0.1, 0.1, 0.1};
         kernel = SkyglowKernel.solve(
-                new LayeredAir(Aerosol.ofDepth(0.1), molecules, haze, GROUNDS), Resolution.COARSE, share -> {});
+                new LayeredAir(Aerosol.ofDepth(0.1), molecules, haze, GROUNDS), TestResolutions.COARSE, share -> {});
         matt = kernel.lit(UpwardShape.mattGround());
     }
 
@@ -149,13 +149,13 @@ class SkyglowKernelTest {
     void tellsHowFarItIsAndStopsWhenTold() {
         LayeredAir air = LayeredAir.of(Atmosphere.atSeaLevel(Clearness.CLEAR), new double[] {0.15}, new double[] {550});
         List<Double> shares = Collections.synchronizedList(new ArrayList<>());
-        SkyglowKernel.solve(air, Resolution.COARSE, shares::add);
+        SkyglowKernel.solve(air, TestResolutions.COARSE, shares::add);
         assertThat(shares)
                 .hasSizeGreaterThan(100)
                 .allMatch(share -> share > 0 && share <= 1)
                 .contains(1.0);
 
-        assertThatThrownBy(() -> SkyglowKernel.solve(air, Resolution.COARSE, share -> {
+        assertThatThrownBy(() -> SkyglowKernel.solve(air, TestResolutions.COARSE, share -> {
                     if (share > 0.3) {
                         throw new CancellationException("enough");
                     }

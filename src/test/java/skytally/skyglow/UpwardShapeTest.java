@@ -3,6 +3,7 @@ package skytally.skyglow;
 import static org.assertj.core.api.Assertions.assertThat;
 import static org.assertj.core.api.Assertions.within;
 
+import java.util.ArrayList;
 import java.util.List;
 import org.junit.jupiter.api.DisplayName;
 import org.junit.jupiter.api.Test;
@@ -54,7 +55,7 @@ class UpwardShapeTest {
         double ahead = Math.sin(tilt) * Math.cos(1);
         double left = Math.sin(tilt) * Math.sin(1);
         double half = Math.acos(Math.pow(0.5, 1 / exponent));
-        List<Emission.Cone> edges = new java.util.ArrayList<>();
+        List<Emission.Cone> edges = new ArrayList<>();
         for (double angle = half; angle < Math.PI / 2; angle *= 2) {
             edges.add(new Emission.Cone(ahead, left, up, Math.cos(angle)));
         }
