@@ -29,7 +29,10 @@ record Resolution(
         int laterHigh,
         AngularBasis laterBasis) {
 
-    /** Within a few tenths of a per cent as a rule and 3 % at worst, 100 km away and low in the sky. */
+    /**
+     * Against one with twelve times the work, 0.5 to 100 km away and down to 5° above the horizon: half of all directions
+     * within 0.3 %, nineteen in twenty within 2 %, all within 4 %, the worst 75 to 100 km away in haze.
+     */
     static final Resolution USUAL = new Resolution(
             30,
             14,

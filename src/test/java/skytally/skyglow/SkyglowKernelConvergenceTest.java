@@ -20,6 +20,7 @@ class SkyglowKernelConvergenceTest {
             Aerosol.ofDepth(0.1), new double[] {0.0975, 0.0975}, new double[] {0.1, 0.3}, new double[] {0.15, 0.6});
 
     private static final double[] DISTANCES_M = {500, 3000, 10_000, 30_000, 100_000};
+    private static final double[] EYE_HEIGHTS_M = {0, 3000};
     private static final double[] ZENITH_ANGLES_DEG = {0, 45, 75, 85};
     private static final double[] AZIMUTHS_DEG = {0, 45, 180};
 
@@ -42,20 +43,29 @@ class SkyglowKernelConvergenceTest {
         for (String emission : List.of("lambert", "ring80-90")) {
             Emission light = TestEmissions.named(emission);
             SkyField field = kernel.lit(UpwardShape.of(light));
-            for (double distance : DISTANCES_M) {
-                for (double zenithAngle : ZENITH_ANGLES_DEG) {
-                    for (double azimuth : AZIMUTHS_DEG) {
-                        Sightline line = Sightline.ofDegrees(distance, 0, zenithAngle, azimuth);
-                        double[] once = kernel.firstOrder().radiance(light, line);
-                        double[] more = field.higherOrders(line);
-                        for (int air = 0; air < once.length; air++) {
-                            totals.add(once[air] + more[air]);
-                        }
-                    }
+            for (Sightline line : lines()) {
+                double[] once = kernel.firstOrder().radiance(light, line);
+                double[] more = field.higherOrders(line);
+                for (int air = 0; air < once.length; air++) {
+                    totals.add(once[air] + more[air]);
                 }
             }
         }
         return totals;
+    }
+
+    private static List<Sightline> lines() {
+        List<Sightline> lines = new ArrayList<>();
+        for (double distance : DISTANCES_M) {
+            for (double eyeHeight : EYE_HEIGHTS_M) {
+                for (double zenithAngle : ZENITH_ANGLES_DEG) {
+                    for (double azimuth : AZIMUTHS_DEG) {
+                        lines.add(Sightline.ofDegrees(distance, eyeHeight, zenithAngle, azimuth));
+                    }
+                }
+            }
+        }
+        return lines;
     }
 
     private static List<Double> differences(List<Double> found, List<Double> expected) {
