@@ -51,6 +51,18 @@ public final class Benchmarks {
                 "A line of sight by a library's adaptive integrator, against the house's rule",
                 "SingleScatteringBenchmark.byLibrary",
                 "SingleScatteringBenchmark.byHouse");
+        ratio(
+                "A dome of all orders, against its first order alone",
+                "SkyglowKernelBenchmark.dome",
+                "SkyglowKernelBenchmark.firstOrderOfDome");
+        ratio(
+                "A new atmosphere, against a dome in one that is ready",
+                "SkyglowKernelBenchmark.newAtmosphere",
+                "SkyglowKernelBenchmark.dome");
+        ratio(
+                "A new atmosphere one wavelength at a time, against six side by side",
+                "SkyglowKernelBenchmark.newAtmosphereByWavelength",
+                "SkyglowKernelBenchmark.newAtmosphere");
     }
 
     private void ratio(String what, String over, String under) {

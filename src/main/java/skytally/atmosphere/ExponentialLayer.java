@@ -29,7 +29,7 @@ public final class ExponentialLayer {
     private static final double DEEPEST_EXPONENT = 60;
 
     /** e to the tenth: how much thinner the layer may be at one end than at the other to be short. */
-    private static final double SHORT_THINNING = Math.exp(0.1);
+    private static final double SHORT_THINNING = StrictMath.exp(0.1);
 
     private static final double SHORT_SAG = 0.005;
 
@@ -99,7 +99,7 @@ public final class ExponentialLayer {
         if (to <= 0) {
             return scale * (toDensity * scaledErfc(-to) - fromDensity * scaledErfc(-from));
         }
-        double lowest = 2 * fromDensity * Math.exp(Math.min(from * from, DEEPEST_EXPONENT));
+        double lowest = 2 * fromDensity * StrictMath.exp(Math.min(from * from, DEEPEST_EXPONENT));
         return scale * (lowest - fromDensity * scaledErfc(-from) - toDensity * scaledErfc(to));
     }
 
