@@ -67,10 +67,16 @@ final class DirectWorkings extends Shown {
                                 "heights, distance and tilt"),
                         input("Kind of fitting", "i", "plain shape", Property.SHAPE, lamp.type()),
                         input(
-                                "Tilt toward you",
+                                isOnePoint() ? "Tilt toward you" : "Tilt from straight down",
                                 "t",
                                 written(lamp.attitude().tiltDeg(), "°"),
                                 Property.TILT,
+                                lamp.type()),
+                        input(
+                                "Bearing the fitting faces",
+                                "β",
+                                written(lamp.attitude().bearingDeg(), "°"),
+                                Property.BEARING,
                                 lamp.type())),
                 cite("plain-shapes"),
                 List.of("A plain shape stands in for the fitting: a photometric file of the fitting replaces it."));

@@ -6,6 +6,8 @@ import java.util.List;
 import java.util.Map;
 import java.util.Optional;
 import java.util.OptionalDouble;
+import java.util.Set;
+import java.util.stream.Collectors;
 import java.util.stream.Stream;
 import skytally.atmosphere.Aerosol;
 import skytally.atmosphere.Atmosphere;
@@ -42,6 +44,7 @@ import skytally.spectrum.SpectralClasses;
 public final class SceneDrawing {
 
     private static final double GLARE_ANGLE_RAD = Math.toRadians(10);
+    private static final double NEAREST_LAMP_M = 0.1;
     private static final double LOW_SKY_RAD = Math.toRadians(30);
     /** A driver looks this far below the level (CIE 140 and EN 13201-3, from memory). */
     private static final double ROAD_DIP_RAD = Math.toRadians(1);
@@ -341,7 +344,7 @@ public final class SceneDrawing {
         states.put(Property.EYE_HEIGHT, eye.known());
         states.put(Property.LOOK_ANGLE, Known.assumed("a choice: level, 10° beside the brightest light"));
         double ground = number(Subject.PLACE, "groundHeight", place.values()).orElse(siteGroundM());
-        Position at = new Position(east, north, ground - baseM + eye.number());
+        Position at = clearOfLamps(new Position(east, north, ground - baseM + eye.number()));
         double toSite = at.bearingTo(new Position(0, 0, 0));
         double facing =
                 Math.toRadians(number(Subject.PLACE, "facing", place.values()).orElse(Math.toDegrees(toSite)));
@@ -354,7 +357,7 @@ public final class SceneDrawing {
         }
         for (Place.NamedLook look : place.looks()) {
             looks.add(new Look(
-                    look.name(),
+                    freeId(look.name(), looks),
                     Look.Purpose.SKY,
                     Direction.toward(Math.toRadians(look.bearingDeg()), Math.toRadians(look.altitudeDeg()))));
         }
@@ -373,6 +376,29 @@ public final class SceneDrawing {
                 pane(place.values()),
                 roadLuminance(place.values()),
                 groundToward(place));
+    }
+
+    /** A name of its own among the directions of a place, for people may give two the same, or that of one of ours. */
+    private static String freeId(String name, List<Look> looks) {
+        String plain = name.replace('/', '-');
+        Set<String> taken = looks.stream().map(Look::id).collect(Collectors.toSet());
+        String id = plain;
+        for (int number = 2; taken.contains(id); number++) {
+            id = plain + " (" + number + ")";
+        }
+        return id;
+    }
+
+    /** An eye that sits in a lamp is moved up out of it. */
+    private Position clearOfLamps(Position eye) {
+        boolean inside = lamps.stream()
+                .anyMatch(lamp -> Math.hypot(
+                                lamp.position().groundDistanceTo(eye),
+                                lamp.position().heightM() - eye.heightM())
+                        < NEAREST_LAMP_M);
+        return inside
+                ? clearOfLamps(new Position(eye.eastM(), eye.northM(), eye.heightM() + 2 * NEAREST_LAMP_M))
+                : eye;
     }
 
     private GroundLine groundToward(Place place) {

@@ -12,13 +12,15 @@ import skytally.scene.Scene;
  * @param scene      likely values
  * @param leftOut    marks of types that could not be reckoned with
  * @param unplaced   marks of types some of whose lights have no position
+ * @param unaimed    marks of types that face true north because nobody said where to
  * @param assessment nothing where no lamp can be reckoned with
  */
-public record Night(Scene scene, List<String> leftOut, List<String> unplaced, Optional<Assessment> assessment) {
+public record Night(Scene scene, List<String> leftOut, List<String> unplaced, List<String> unaimed, Optional<Assessment> assessment) {
 
     public Night {
         leftOut = List.copyOf(leftOut);
         unplaced = List.copyOf(unplaced);
+        unaimed = List.copyOf(unaimed);
     }
 
     /** Who looks from that place; nothing where it has no position. */

@@ -10,6 +10,7 @@ import skytally.assessment.Assessment;
 import skytally.figures.NumberRow;
 import skytally.notation.QuantityFormat;
 import skytally.project.Place;
+import skytally.project.SceneDrawing;
 import skytally.project.Scheme;
 import skytally.project.entry.Amount;
 import skytally.project.entry.Words;
@@ -118,6 +119,9 @@ public record PlaceFrame(
             notes.add(words.say("review.left-out", listed(night.leftOut())));
         }
         unplaced(review, words).forEach(notes::add);
+        if (!night.unaimed().isEmpty()) {
+            notes.add(words.say("review.unaimed", listed(night.unaimed())));
+        }
         if (!review.asked().asEntered()) {
             notes.add(words.say("review.air", review.asked().air().words()));
         }
@@ -128,7 +132,12 @@ public record PlaceFrame(
         return notes;
     }
 
-    private static String listed(List<String> marks) {
+    private static String listed(List<String> all) {
+        List<String> marks = all.stream()
+                .map(mark -> mark.startsWith(SceneDrawing.EXISTING)
+                        ? "existing " + mark.substring(SceneDrawing.EXISTING.length())
+                        : mark)
+                .toList();
         return marks.size() == 1
                 ? marks.get(0)
                 : String.join(", ", marks.subList(0, marks.size() - 1)) + " and " + marks.get(marks.size() - 1);

@@ -103,6 +103,7 @@ public class Reviews {
                 likely,
                 drawn.leftOut(),
                 drawn.unplaced(),
+                drawn.unaimed(),
                 likely.allLamps().isEmpty() || likely.observers().isEmpty()
                         ? Optional.empty()
                         : Optional.of(new Assessor(circumstance).assess(drawn.scene(), scope)));
