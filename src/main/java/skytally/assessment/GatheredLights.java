@@ -22,7 +22,7 @@ import skytally.spectrum.Spectrum;
  * The lamps of a scene as a line of sight meets them: those that stand close together, measured by how far the line
  * passes them, count as one light at their middle. What is not far enough is divided, down to the single lamp.
  *
- * <p>Lamps are gathered around the middle of what they send up and the ground under them sends back. From 300 m on a sky
+ * <p>A project of up to {@link #FEW} lamps is reckoned lamp by lamp. Lamps are gathered around the middle of what they send up and the ground under them sends back. From 300 m on a sky
  * comes out within 0.5 % of the one made lamp by lamp, even in a town of lamps of all kinds turned every way; there, too,
  * gathering within 1 % would leave 0.2 %.
  */
@@ -32,15 +32,19 @@ final class GatheredLights {
     static final double APART = 0.02;
 
     /** The same where only shares are wanted: within 1 %, at a ninth of the work. */
-    static final double APART_FOR_SHARES = 0.06;
+    private static final double APART_FOR_SHARES = 0.06;
 
     /** Share that usual ground sends back, for weighing lamps against each other only. */
     private static final double USUAL_GROUND = 0.12;
 
     private static final double NONE_BEYOND_M = 500_000;
 
+    /** Up to so many lamps none is gathered: each counts from where it hangs. */
+    private static final int FEW = 1000;
+
     private final List<Strand> strands;
     private final List<Node> roots;
+    private final boolean few;
 
     /** Lamps of one type and one spectrum, whose light is added up apart. */
     record Strand(String type, Spectrum spectrum) {}
@@ -94,6 +98,7 @@ final class GatheredLights {
                 leaves.add(leaf(lamp, strand, lumens, downward));
             }
         }
+        few = leaves.size() <= FEW;
         strands = List.copyOf(index.keySet());
         roots = leaves.isEmpty() ? List.of() : List.of(gathered(leaves));
     }
@@ -194,7 +199,12 @@ final class GatheredLights {
 
         /** The lights to reckon with along one line of sight. */
         List<Light> along(Direction look) {
-            return along(look, APART);
+            return along(look, few ? 0 : APART);
+        }
+
+        /** The same where only shares are wanted. */
+        List<Light> forShares(Direction look) {
+            return along(look, few ? 0 : APART_FOR_SHARES);
         }
 
         /**

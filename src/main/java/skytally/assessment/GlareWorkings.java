@@ -2,7 +2,9 @@ package skytally.assessment;
 
 import java.util.ArrayList;
 import java.util.List;
+import skytally.glare.VeilReach;
 import skytally.glare.VeilingLuminance;
+import skytally.photometry.Illuminance;
 import skytally.scene.OpenScene;
 import skytally.scene.Property;
 import skytally.spectrum.SpectralClasses;
@@ -51,7 +53,10 @@ final class GlareWorkings extends Shown {
     private Working veilOfMany(int look) {
         List<Working.Input> inputs = new ArrayList<>(byType("L_v", " cd/m²", Contribution::veilCdM2));
         inputs.add(worked(
-                "Angle beside the brightest lamp", "θ₁", result(Measure.GLARE_ANGLE, look), "the direction looked in"));
+                "Angle beside the brightest lamp",
+                "θ₁",
+                result(Measure.GLARE_ANGLE, look),
+                "level, on the side of it where the veil is the weaker"));
         inputs.add(constant("Age of the observer", "A", "35 years"));
         inputs.add(constant("Pigment of the eye", "p", "0.5 (brown)"));
         return new Working(
@@ -150,7 +155,7 @@ final class GlareWorkings extends Shown {
                 "E · f(θ₁) = L₀ · 10^(−0.4 · 22.0)",
                 numbers.get(Measure.VEIL_REACH, look) > 0
                         ? "θ₁ = " + result(Measure.VEIL_REACH, look)
-                        : "no such angle between 0.1° and 100°",
+                        : noReach(),
                 List.of(
                         worked("Light at the eye", "E", result(Measure.ILLUMINANCE), "its own working"),
                         zeroPointLuminance()),
@@ -158,15 +163,23 @@ final class GlareWorkings extends Shown {
                 List.of("Nearer to the lights than this, the veil is brighter than a natural sky of 22.0."));
     }
 
+    private String noReach() {
+        VeilReach reach = PlaceNumbers.VEIL.angleWhereVeilEquals(
+                new Illuminance(numbers.get(Measure.ILLUMINANCE)), PlaceNumbers.naturalOnVisualScale());
+        return "no such angle between 0.1° and 100°: there the veil is "
+                + (reach instanceof VeilReach.Throughout ? "the brighter" : "the darker") + " at every one";
+    }
+
     Working halo(int look) {
         return new Working(
                 "L = N ∫ I(γ') / r² · e^(−τ₁) · [ β_m p_m + ω β_a p_a ] · e^(−τ₂) ds",
                 "L = " + result(Measure.HALO, look) + " along the line " + result(Measure.GLARE_ANGLE, look)
                         + " beside the lights",
-                skyInputs(),
+                airInputs(),
                 cite("single-scattering", "bodhaine-1999", "henyey-greenstein-1941", "aerosol-defaults"),
                 List.of(
                         FIRST_ORDER,
+                        "Of the lamps alone. What the air scatters of the lit ground is in the sky, not here.",
                         "This is light of the air itself, for cameras too; it adds to the sky, the veil does not."));
     }
 

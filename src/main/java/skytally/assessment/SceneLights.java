@@ -64,7 +64,7 @@ final class SceneLights {
 
         /** Good enough for the shares of the types, and quicker. */
         SkyLight sharesAlong(Look look) {
-            return along(look, seen.along(look.direction(), GatheredLights.APART_FOR_SHARES), lamps);
+            return along(look, seen.forShares(look.direction()), lamps);
         }
 
         /** Of the lamps that shine at present. */

@@ -68,8 +68,22 @@ abstract class Shown {
                 : count + " lights, each with its own distance and angle";
     }
 
-    /** What goes into the light that the air sends back. */
+    /** What goes into the light that the air sends back, of the lamps and of the ground they light. */
     final List<Working.Input> skyInputs() {
+        List<Working.Input> inputs = new ArrayList<>(airInputs());
+        inputs.add(
+                1,
+                input(
+                        "Share the ground sends back",
+                        "ρ",
+                        written(numbers.scene().surroundings().groundReflectance(), ""),
+                        Property.GROUND,
+                        place));
+        return inputs;
+    }
+
+    /** The same of the lamps alone. */
+    final List<Working.Input> airInputs() {
         List<Working.Input> inputs = new ArrayList<>();
         double lumens = numbers.scene().allLamps().stream()
                 .mapToDouble(one -> one.allFlux().lumens())
@@ -82,12 +96,6 @@ abstract class Shown {
                     withUnit(Measure.UPWARD_SHARE, numbers.get(Measure.UPWARD_SHARE)),
                     "its shape and tilt"));
         }
-        inputs.add(input(
-                "Share the ground sends back",
-                "ρ",
-                written(numbers.scene().surroundings().groundReflectance(), ""),
-                Property.GROUND,
-                place));
         inputs.add(input(
                 "Aerosol optical depth at 550 nm",
                 "τ_a",

@@ -342,7 +342,7 @@ public final class SceneDrawing {
         Reading eye = Reading.of(Subject.PLACE, "eyeHeight", place.values()).orElseThrow();
         Map<Property, Known> states = known.computeIfAbsent(place.mark(), mark -> new HashMap<>());
         states.put(Property.EYE_HEIGHT, eye.known());
-        states.put(Property.LOOK_ANGLE, Known.assumed("a choice: level, 10° beside the brightest light"));
+        states.put(Property.LOOK_ANGLE, Known.assumed("a choice: level, 10° beside the brightest light, on the side where the veil is the weaker"));
         double ground = number(Subject.PLACE, "groundHeight", place.values()).orElse(siteGroundM());
         Position at = clearOfLamps(new Position(east, north, ground - baseM + eye.number()));
         double toSite = at.bearingTo(new Position(0, 0, 0));

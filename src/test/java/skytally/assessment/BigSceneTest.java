@@ -43,7 +43,7 @@ class BigSceneTest {
     /** What is worked out for a place beside another is what is worked out for it alone. */
     @Test
     void saysOfAPlaceNotLookedAtWhatItSaysWhenLookedAt() {
-        OpenScene scene = BigScene.of(400, 6);
+        OpenScene scene = BigScene.of(1500, 6);
         Assessor assessor = new Assessor(Circumstance.EARLY_CLEAR);
         Assessment whole = assessor.assess(scene);
         Assessment part = assessor.assess(scene, Scope.of("P1", Others.DIRECT_AND_OVERHEAD));

@@ -21,7 +21,7 @@ record EdgeOfSite(String where, List<NumberRow> rows) {
 
     private static final Position REFERENCE = new Position(0, 0, 0);
     private static final List<String> MEASURES = List.of(
-            "direct/window-illuminance",
+            "direct/worst-plane-illuminance",
             "direct/worst-plane-facing",
             "direct/level-illuminance",
             "direct/illuminance",

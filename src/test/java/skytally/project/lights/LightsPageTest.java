@@ -56,8 +56,11 @@ class LightsPageTest {
     private Pages.Page typed(String mark, String... namesAndValues) throws Exception {
         List<String> sent = new ArrayList<>(List.of("doing", "save", "document", "D1", "party", "applicant"));
         sent.addAll(List.of(namesAndValues));
+        if (sent.contains("tilt")) {
+            sent.addAll(List.of("tilt-low", "", "tilt-high", "")); // the range of the tilt before
+        }
         Pages.Page saved = pages.post(lights + "/proposed/types/" + mark, sent.toArray(String[]::new));
-        assertThat(saved.status()).isEqualTo(200);
+        assertThat(saved.status()).as(saved.words()).isEqualTo(200);
         return saved;
     }
 
