@@ -88,7 +88,7 @@ class ProjectPagesBrowserTest {
         choose(browser, "document", "D1 Luminaire schedule");
         type(browser, "east", east);
         type(browser, "north", north);
-        send(browser, "north", "The lights were added to the plan.");
+        send(browser, "north", "1 light was added to the plan.");
     }
 
     private void aPlace(Browser browser, String mark, String east, String north) {
