@@ -153,9 +153,7 @@ final class GlareWorkings extends Shown {
     Working veilReach(int look) {
         return new Working(
                 "E · f(θ₁) = L₀ · 10^(−0.4 · 22.0)",
-                numbers.get(Measure.VEIL_REACH, look) > 0
-                        ? "θ₁ = " + result(Measure.VEIL_REACH, look)
-                        : noReach(),
+                numbers.get(Measure.VEIL_REACH, look) > 0 ? "θ₁ = " + result(Measure.VEIL_REACH, look) : noReach(),
                 List.of(
                         worked("Light at the eye", "E", result(Measure.ILLUMINANCE), "its own working"),
                         zeroPointLuminance()),

@@ -342,7 +342,10 @@ public final class SceneDrawing {
         Reading eye = Reading.of(Subject.PLACE, "eyeHeight", place.values()).orElseThrow();
         Map<Property, Known> states = known.computeIfAbsent(place.mark(), mark -> new HashMap<>());
         states.put(Property.EYE_HEIGHT, eye.known());
-        states.put(Property.LOOK_ANGLE, Known.assumed("a choice: level, 10° beside the brightest light, on the side where the veil is the weaker"));
+        states.put(
+                Property.LOOK_ANGLE,
+                Known.assumed(
+                        "a choice: level, 10° beside the brightest light, on the side where the veil is the weaker"));
         double ground = number(Subject.PLACE, "groundHeight", place.values()).orElse(siteGroundM());
         Position at = clearOfLamps(new Position(east, north, ground - baseM + eye.number()));
         double toSite = at.bearingTo(new Position(0, 0, 0));
@@ -396,9 +399,7 @@ public final class SceneDrawing {
                                 lamp.position().groundDistanceTo(eye),
                                 lamp.position().heightM() - eye.heightM())
                         < NEAREST_LAMP_M);
-        return inside
-                ? clearOfLamps(new Position(eye.eastM(), eye.northM(), eye.heightM() + 2 * NEAREST_LAMP_M))
-                : eye;
+        return inside ? clearOfLamps(new Position(eye.eastM(), eye.northM(), eye.heightM() + 2 * NEAREST_LAMP_M)) : eye;
     }
 
     private GroundLine groundToward(Place place) {

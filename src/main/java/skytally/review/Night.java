@@ -15,7 +15,12 @@ import skytally.scene.Scene;
  * @param unaimed    marks of types that face true north because nobody said where to
  * @param assessment nothing where no lamp can be reckoned with
  */
-public record Night(Scene scene, List<String> leftOut, List<String> unplaced, List<String> unaimed, Optional<Assessment> assessment) {
+public record Night(
+        Scene scene,
+        List<String> leftOut,
+        List<String> unplaced,
+        List<String> unaimed,
+        Optional<Assessment> assessment) {
 
     public Night {
         leftOut = List.copyOf(leftOut);

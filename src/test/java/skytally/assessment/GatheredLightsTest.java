@@ -66,8 +66,9 @@ class GatheredLightsTest {
     @Test
     void areFewerTheFartherTheyAre() {
         GatheredLights gathered = new GatheredLights(TOWN);
-        int near =
-                gathered.seenFrom(new Position(0, 0, 1.6)).along(Direction.UP, GatheredLights.APART).size();
+        int near = gathered.seenFrom(new Position(0, 0, 1.6))
+                .along(Direction.UP, GatheredLights.APART)
+                .size();
         int far = gathered.seenFrom(new Position(5000, 0, 1.6))
                 .along(Direction.UP, GatheredLights.APART)
                 .size();
@@ -82,9 +83,10 @@ class GatheredLightsTest {
     @Test
     void keepTheirLumensByKindAndDirection() {
         GatheredLights gathered = new GatheredLights(TOWN);
-        double lumens = gathered.seenFrom(new Position(80_000, 0, 1.6)).along(Direction.UP, GatheredLights.APART).stream()
-                .flatMapToDouble(light -> java.util.Arrays.stream(light.lumens()))
-                .sum();
+        double lumens =
+                gathered.seenFrom(new Position(80_000, 0, 1.6)).along(Direction.UP, GatheredLights.APART).stream()
+                        .flatMapToDouble(light -> java.util.Arrays.stream(light.lumens()))
+                        .sum();
         assertThat(lumens)
                 .isCloseTo(
                         TOWN.stream()

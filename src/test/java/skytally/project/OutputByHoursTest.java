@@ -139,8 +139,10 @@ class OutputByHoursTest {
                         Stated.of(Claim.given("0 0; 20 0; 20 20; 0 20", "m", Source.reason("test"), Party.APPLICANT))));
         SceneDrawing.Drawn early = SceneDrawing.of(project, scheme, SceneDrawing.Period.EARLY);
         SceneDrawing.Drawn late = SceneDrawing.of(project, scheme, SceneDrawing.Period.LATE);
-        assertThat(early.scene().drawn(Map.of()).unplaced().get(0).flux().lumens()).isEqualTo(1000);
-        assertThat(late.scene().drawn(Map.of()).unplaced().get(0).flux().lumens()).isEqualTo(300);
+        assertThat(early.scene().drawn(Map.of()).unplaced().get(0).flux().lumens())
+                .isEqualTo(1000);
+        assertThat(late.scene().drawn(Map.of()).unplaced().get(0).flux().lumens())
+                .isEqualTo(300);
         assertThat(late.unplaced()).containsExactly("A1");
         assertThat(late.scene().drawn(Map.of()).unplaced().get(0).position().eastM())
                 .isCloseTo(10, within(1e-9));
