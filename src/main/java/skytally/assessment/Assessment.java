@@ -45,6 +45,7 @@ public record Assessment(
         FAINT,
         GROUND_NOT_A_POINT,
         FAR_SKY,
+        NO_READING,
         FIRST_SCATTERING
     }
 

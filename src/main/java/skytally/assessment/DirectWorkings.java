@@ -30,7 +30,10 @@ final class DirectWorkings extends Shown {
                         input("Height of the eye", "h₂", m(eyeHeight()), Property.EYE_HEIGHT, place),
                         constant("Earth enlarged for mean refraction", "R", "7/6 × 6 371 km")),
                 cite("mean-refraction"),
-                List.of("The ground is taken as level but for the curve of the Earth; nothing stands between."));
+                List.of(
+                        numbers.observer().ground().points().isEmpty()
+                                ? "The ground is taken as level but for the curve of the Earth; nothing stands between."
+                                : "The ground between is as entered; nothing else stands between."));
     }
 
     Working altitude() {

@@ -20,6 +20,13 @@ final class Notes {
     Notes(List<PlaceNumbers> places) {
         places.forEach(this::of);
         place = "";
+        if (places.stream().anyMatch(Notes::lacksReading)) {
+            add(
+                    Topic.NO_READING,
+                    "No reading of the sky is entered. The sky as it is is taken as the natural sky with the lamps that"
+                            + " are entered as there now, which is an assumption: where other lights brighten it, the"
+                            + " increase over it is less than shown.");
+        }
         add(
                 Topic.FIRST_SCATTERING,
                 "Sky glow counts light scattered once only. More scattering adds to it, by about 15 % overhead at 1 km"
@@ -29,6 +36,13 @@ final class Notes {
 
     List<Note> all() {
         return List.copyOf(notes);
+    }
+
+    private static boolean lacksReading(PlaceNumbers numbers) {
+        return numbers.scene()
+                .present()
+                .map(present -> present.zenithMagArcsec2().isEmpty())
+                .orElse(false);
     }
 
     private void of(PlaceNumbers numbers) {

@@ -93,7 +93,7 @@ public record PlaceFrame(
                 .map(Lamp::type)
                 .distinct()
                 .count();
-        String many = lit == all ? "all " + all : lit + " of " + all;
+        String many = all == 1 && lit == 1 ? "its one" : lit == all ? "all " + all : lit + " of " + all;
         String hour = review.asked().hour().capital() + ", " + curfew(review) + ": ";
         return all == 0 ? hour + "nothing is lit." : hour + many + (all == 1 ? " type is lit." : " types are lit.");
     }
@@ -119,6 +119,9 @@ public record PlaceFrame(
             notes.add(words.say("review.left-out", listed(night.leftOut())));
         }
         unplaced(review, words).forEach(notes::add);
+        if (!place.horizon().isEmpty()) {
+            notes.add(words.say("review.skyline"));
+        }
         if (!night.unaimed().isEmpty()) {
             notes.add(words.say("review.unaimed", listed(night.unaimed())));
         }

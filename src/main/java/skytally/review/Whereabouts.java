@@ -49,7 +49,7 @@ public final class Whereabouts {
                         .likely()));
     }
 
-    /** Such as {@code 6 km from the reference point of the site on bearing 28°, the eye 158 m above the ground at that point}. */
+    /** Such as {@code 6 km from the reference point of the site on bearing 28°, the eye 158 m above the ground at the reference point}. */
     public String said(Units units) {
         double distance = reference.groundDistanceTo(observer.eye());
         String above = height(units);
@@ -64,10 +64,10 @@ public final class Whereabouts {
     private String height(Units units) {
         double rise = observer.eye().heightM() - reference.heightM();
         if (Math.abs(rise) < LEVEL_M) {
-            return "the eye level with the ground at that point";
+            return "the eye level with the ground at the reference point";
         }
         return "the eye " + Quantity.length(Math.abs(rise), 2, units) + (rise > 0 ? " above" : " below")
-                + " the ground at that point";
+                + " the ground at the reference point";
     }
 
     /** How high the eye is above its own ground. */

@@ -170,7 +170,7 @@ class ReviewPagesTest {
             Matcher row = Pattern.compile("(?s)<tr role=\"row\" aria-current=\"true\">(.*?)</tr>")
                     .matcher(body);
             assertThat(row.find()).isTrue();
-            Matcher share = Pattern.compile("app-grid__number\">([0-9.]+)<").matcher(row.group(1));
+            Matcher share = Pattern.compile("app-grid__number[^>]*>([0-9.]+)<").matcher(row.group(1));
             double sum = 0;
             while (share.find()) {
                 sum += Double.parseDouble(share.group(1));

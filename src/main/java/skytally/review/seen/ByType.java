@@ -52,8 +52,8 @@ record ByType(String unit, @Nullable Written power, List<Row> rows, Row all) {
                             .map(Share::amount)
                             .map(lux -> written(lux, units, power))
                             .orElse(NONE),
-                    "",
-                    ""));
+                    early.of(type).isPresent() ? door(review, place, Hour.EARLY, doors) : "",
+                    late.of(type).isPresent() ? door(review, place, Hour.LATE, doors) : ""));
         }
         Row all = new Row(
                 "",

@@ -181,14 +181,19 @@ final class HarmCards {
                 unit(window, "upright"),
                 RangeText.of(window, value -> Quantity.light(value, 2, units)).orElse(null),
                 "plane facing " + where.facing() + ", " + where.eyeHeight(units)
-                        + " above its ground; outside of the glass, nothing taken off for air, glass or curtains",
+                        + " above its ground; " + (isWindow() ? "outside of the glass, " : "")
+                        + "nothing taken off for air" + (isWindow() ? ", glass or curtains" : ""),
                 says,
                 more("direct/window-illuminance", value -> Quantity.light(value, 2, units), ""));
     }
 
+    private boolean isWindow() {
+        return place.values().text("kind").equals("home-window");
+    }
+
     private Optional<Said> worst(String measure, String words) {
         return found.find(place.mark(), measure)
-                .filter(figure -> figure.range().isPresent())
+                .filter(figure -> figure.range().isPresent() && figure.likely() > 0)
                 .map(figure ->
                         new Said(words + ": ", Quantity.light(figure.likely(), 2, units), doors.here(figure), "."));
     }
@@ -216,11 +221,13 @@ final class HarmCards {
                         ".")));
         Quantity written = Quantity.luminance(veil.likely(), 2);
         List<Said> more = new ArrayList<>();
-        more.add(new Said(
-                "the brightest lamp stands ",
-                new Quantity(QuantityFormat.significant(angle.likely(), 2), "°"),
-                doors.here(angle),
-                " from there"));
+        if (veil.likely() > 0) {
+            more.add(new Said(
+                    "the brightest lamp stands ",
+                    new Quantity(QuantityFormat.significant(angle.likely(), 2), "°"),
+                    doors.here(angle),
+                    " from there"));
+        }
         more.addAll(more("beside/glare/veil", value -> Quantity.luminance(value, 2), ""));
         return new Card(
                 "Glare",

@@ -68,6 +68,7 @@ record SkyPage(
             Cell with,
             String brighter,
             Written withLuminance,
+            String luminanceDoor,
             Cell overNatural,
             Cell overPresent) {}
 
@@ -131,7 +132,7 @@ record SkyPage(
             return new Said(before, Quantity.increase(line.overNatural().likely()), door(line.overNatural()), present);
         }
 
-        private static Line row(Look look, SkyLine line) {
+        private Line row(Look look, SkyLine line) {
             return new Line(
                     LookNames.of(look),
                     brightnessCell(line.natural()),
@@ -139,6 +140,9 @@ record SkyPage(
                     brightnessCell(line.with()),
                     QuantityFormat.decimals(line.brighterByMag(), 2).digits(),
                     QuantityFormat.significant(line.withCdM2() * 1e3, 2),
+                    found.find(place, look.id() + "/sky/luminance")
+                            .map(Maker::door)
+                            .orElse(door(line.with())),
                     increase(line.overNatural()),
                     line.overPresent().map(Maker::increase).orElse(Cell.NONE));
         }
