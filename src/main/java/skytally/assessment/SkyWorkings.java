@@ -4,7 +4,6 @@ import java.util.ArrayList;
 import java.util.List;
 import skytally.naturalsky.NaturalBackground;
 import skytally.photometry.SurfaceBrightness;
-import skytally.scene.Known;
 import skytally.scene.OpenScene;
 
 /** How the sky in a direction was worked out. */
