@@ -177,6 +177,11 @@ public final class Browser implements AutoCloseable {
         return faults(new AxeBuilder());
     }
 
+    /** The same of all but the contrast of text, which is the same at every width. */
+    public List<String> layoutFaults() {
+        return faults(new AxeBuilder().disableRules(List.of("color-contrast")));
+    }
+
     /** The same of nothing but the contrast of text, which is all that another theme can change. */
     public List<String> contrastFaults() {
         return faults(new AxeBuilder().withRules(List.of("color-contrast")));
