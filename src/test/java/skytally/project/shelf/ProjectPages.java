@@ -28,5 +28,14 @@ public final class ProjectPages {
             "/history/1",
             "/delete");
 
+    /** Other forms of these pages, and pages that a browser test of their own looks at. */
+    public static final List<String> MORE_OF_FERRIN_LANE = List.of(
+            "?scheme=mended",
+            "/lights/proposed/positions?add=polar",
+            "/lights/proposed/positions?add=row",
+            "/lights/proposed/positions?add=ring",
+            "/seen/VA4?harm=glare",
+            "/sky/VA4");
+
     private ProjectPages() {}
 }

@@ -313,7 +313,9 @@ class ShelfPageTest {
         }
         assertThat(opened.status()).isEqualTo(200);
 
-        for (String page : ProjectPages.OF_FERRIN_LANE) {
+        List<String> pages = new ArrayList<>(ProjectPages.OF_FERRIN_LANE);
+        pages.addAll(ProjectPages.MORE_OF_FERRIN_LANE);
+        for (String page : pages) {
             Page answer = visitor.get("/projects/" + opened.id() + page);
             assertThat(answer.status()).as(page).isEqualTo(200);
             assertThat(answer.body()).as(page).doesNotContain("<img");
