@@ -17,6 +17,7 @@ import java.util.stream.Stream;
 import org.openqa.selenium.By;
 import org.openqa.selenium.OutputType;
 import org.openqa.selenium.StaleElementReferenceException;
+import org.openqa.selenium.WebDriverException;
 import org.openqa.selenium.chrome.ChromeDriver;
 import org.openqa.selenium.chrome.ChromeDriverService;
 import org.openqa.selenium.chrome.ChromeOptions;
@@ -41,6 +42,7 @@ public final class Browser implements AutoCloseable {
     public static final int NARROW = 390;
 
     private static final int HEIGHT = 900;
+    private static final String OF_ANOTHER_PAGE = "does not belong to the document";
     private static final Duration PATIENCE = Duration.ofSeconds(60);
 
     private final int port;
@@ -110,7 +112,20 @@ public final class Browser implements AutoCloseable {
     public void awaitText(By where, String text) {
         new WebDriverWait(driver, PATIENCE)
                 .ignoring(StaleElementReferenceException.class)
-                .until(ExpectedConditions.textToBePresentInElementLocated(where, text));
+                .until(page -> hasText(where, text));
+    }
+
+    /** Between two pages the driver may find an element of the one and ask the other for its text. */
+    private Boolean hasText(By where, String text) {
+        try {
+            return ExpectedConditions.textToBePresentInElementLocated(where, text)
+                    .apply(driver);
+        } catch (WebDriverException failed) {
+            if (String.valueOf(failed.getMessage()).contains(OF_ANOTHER_PAGE)) {
+                return false;
+            }
+            throw failed;
+        }
     }
 
     /** Waits until the address has that in it. */
@@ -185,6 +200,17 @@ public final class Browser implements AutoCloseable {
     /** The same of nothing but the contrast of text, which is all that another theme can change. */
     public List<String> contrastFaults() {
         return faults(new AxeBuilder().withRules(List.of("color-contrast")));
+    }
+
+    /**
+     * What axe finds at a width and in a theme, each rule looked at where it can differ: all of them by day on a wide page,
+     * all but contrast by day on a narrow one, and contrast alone in a theme that changes colours and nothing else.
+     */
+    public List<String> faultsAt(int width, boolean day) {
+        if (!day) {
+            return contrastFaults();
+        }
+        return width == WIDE ? accessibilityFaults() : layoutFaults();
     }
 
     private List<String> faults(AxeBuilder axe) {

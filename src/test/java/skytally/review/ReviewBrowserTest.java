@@ -37,13 +37,13 @@ class ReviewBrowserTest {
                 for (int width : new int[] {Browser.WIDE, Browser.NARROW}) {
                     String name = open(browser, project, page, Theme.DAY, width);
                     browser.screenshot(name, width);
-                    assertThat(browser.accessibilityFaults()).as(name).isEmpty();
+                    assertThat(browser.faultsAt(width, true)).as(name).isEmpty();
                     assertThat(browser.scrollsSideways()).as(name).isFalse();
                 }
                 for (Theme theme : List.of(Theme.DARK, Theme.TELESCOPE)) { // which change colours and nothing else
                     String name = open(browser, project, page, theme, Browser.WIDE);
                     browser.screenshot(name, Browser.WIDE);
-                    assertThat(browser.contrastFaults()).as(name).isEmpty();
+                    assertThat(browser.faultsAt(Browser.WIDE, false)).as(name).isEmpty();
                 }
                 byte[] pdf = browser.print(page.replace('/', '-'), Browser.Paper.A4);
                 assertThat(pdf.length).isBetween(20_000, 3_000_000);

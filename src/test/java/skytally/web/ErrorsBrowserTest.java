@@ -31,7 +31,8 @@ class ErrorsBrowserTest {
 
                     assertThat(browser.driver().findElement(By.tagName("h1")).getText())
                             .isEqualTo("There is no such page");
-                    assertThat(browser.accessibilityFaults()).isEmpty();
+                    assertThat(browser.faultsAt(width, theme == Switches.Theme.DAY))
+                            .isEmpty();
                     assertThat(browser.scrollsSideways()).isFalse();
                 }
             }

@@ -35,7 +35,7 @@ class EveryPageBrowserTest {
                                 Saving.by("", "A sample"))
                         .project()
                         .id();
-        List<String> pages = new ArrayList<>(List.of("/", "/projects", "/guide"));
+        List<String> pages = new ArrayList<>(List.of("/projects", "/guide"));
         ProjectPages.OF_FERRIN_LANE.forEach(page -> pages.add(project + page));
         return pages;
     }
@@ -48,17 +48,14 @@ class EveryPageBrowserTest {
                 for (int width : new int[] {Browser.WIDE, Browser.NARROW}) {
                     open(browser, page, Theme.DAY, width);
                     browser.screenshot("every" + name(page) + "-" + width, width);
-                    note(
-                            faults,
-                            page + " at " + width,
-                            width == Browser.WIDE ? browser.accessibilityFaults() : browser.layoutFaults());
+                    note(faults, page + " at " + width, browser.faultsAt(width, true));
                     if (browser.scrollsSideways()) {
                         faults.add(page + " scrolls sideways at " + width);
                     }
                 }
                 for (Theme theme : List.of(Theme.DARK, Theme.TELESCOPE)) {
                     open(browser, page, theme, Browser.WIDE);
-                    note(faults, page + " " + theme, browser.contrastFaults());
+                    note(faults, page + " " + theme, browser.faultsAt(Browser.WIDE, false));
                 }
             }
         }

@@ -16,8 +16,8 @@ public final class ProjectPages {
             "/site",
             "/lights",
             "/lights/proposed/types/A1",
-            "/lights/proposed/positions",
-            "/lights/proposed/positions?add=block",
+            "/lights/proposed/positions?type=A2",
+            "/lights/proposed/positions?add=block&type=A9",
             "/lights/proposed/positions/A1-01",
             "/places",
             "/places?add=polar",
@@ -31,6 +31,7 @@ public final class ProjectPages {
     /** Other forms of these pages, and pages that a browser test of their own looks at. */
     public static final List<String> MORE_OF_FERRIN_LANE = List.of(
             "?scheme=mended",
+            "/lights/proposed/positions",
             "/lights/proposed/positions?add=polar",
             "/lights/proposed/positions?add=row",
             "/lights/proposed/positions?add=ring",
